@@ -1,0 +1,16 @@
+import type { Transaction } from "sequelize";
+import { AuditEntry } from "./models/AuditEntry";
+
+/** Writes who changed what, in the transaction that changes it. `actorId` is null for the clock and for services. */
+export async function audit(
+  entry: {
+    actorId: string | null;
+    action: string;
+    subjectType: string;
+    subjectId: string;
+    detail?: Record<string, unknown>;
+  },
+  transaction: Transaction,
+): Promise<void> {
+  await AuditEntry.create({ ...entry, detail: entry.detail ?? {} }, { transaction });
+}
