@@ -1,0 +1,26 @@
+import type { Transaction } from "sequelize";
+import { addJob } from "../jobs/addJob";
+import { Mail } from "../models/Mail";
+
+/** What each template is filled with. */
+export type MailPayloads = {
+  "verify-email": { displayName: string; url: string };
+  "reset-password": { displayName: string; url: string };
+  "password-changed": { displayName: string };
+  "address-in-use": { displayName: string; url: string };
+  "order-confirmation": { orderId: string };
+  "new-order": { parcelId: string };
+  "order-refunded": { orderId: string; reason: string };
+};
+
+/**
+ * Writes a mail and the job that sends it, in the caller's transaction. The same `cause` is written once, whatever is
+ * retried; it names the event and the recipient, for example `order-confirmation:<order id>:buyer`.
+ */
+export async function queueMail<Template extends keyof MailPayloads>(
+  mail: { cause: string; template: Template; recipient: string; payload: MailPayloads[Template] },
+  transaction: Transaction,
+): Promise<void> {
+  const [row, created] = await Mail.findOrCreate({ where: { cause: mail.cause }, defaults: mail, transaction });
+  if (created) await addJob("sendMail", { mailId: row.id }, transaction, { key: `mail:${row.id}` });
+}
