@@ -1,6 +1,6 @@
-import type { Transaction } from "sequelize";
+import { QueryTypes, type Transaction } from "sequelize";
+import { database } from "../db/inTransaction";
 import { addJob } from "../jobs/addJob";
-import { Mail } from "../models/Mail";
 
 /** What each template is filled with. */
 export type MailPayloads = {
@@ -21,6 +21,10 @@ export async function queueMail<Template extends keyof MailPayloads>(
   mail: { cause: string; template: Template; recipient: string; payload: MailPayloads[Template] },
   transaction: Transaction,
 ): Promise<void> {
-  const [row, created] = await Mail.findOrCreate({ where: { cause: mail.cause }, defaults: mail, transaction });
-  if (created) await addJob("sendMail", { mailId: row.id }, transaction, { key: `mail:${row.id}` });
+  const written = await database().query<{ id: string }>(
+    `INSERT INTO mails (cause, template, recipient, payload) VALUES ($cause, $template, $recipient, $payload::jsonb)
+     ON CONFLICT (cause) DO NOTHING RETURNING id`,
+    { bind: { ...mail, payload: JSON.stringify(mail.payload) }, type: QueryTypes.SELECT, transaction },
+  );
+  for (const { id } of written) await addJob("sendMail", { mailId: id }, transaction, { key: `mail:${id}` });
 }

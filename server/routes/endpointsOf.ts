@@ -1,7 +1,8 @@
 import type { Endpoint } from "../http/endpoint";
 import type { Services } from "../Services";
+import { authRoutes } from "./auth";
 
 /** Every call of the interface. One that is not listed here is neither served nor described. */
-export function endpointsOf(_services: Services): Endpoint[] {
-  return [];
+export function endpointsOf(services: Services): Endpoint[] {
+  return [...authRoutes(services)];
 }

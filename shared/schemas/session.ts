@@ -54,6 +54,9 @@ export type Session = z.infer<typeof Session>;
 
 const Token = z.string().regex(/^[A-Za-z0-9_-]{43}$/, "This link is not complete: open it again from the mail");
 
+/** What sign-up answers, whether or not the address had an account. */
+export const SignedUp = z.object({ email: z.string() });
+
 export const VerifyEmail = z.object({ token: Token });
 export const RequestPasswordReset = z.object({ email: Email });
 export type RequestPasswordReset = z.infer<typeof RequestPasswordReset>;
