@@ -23,6 +23,8 @@ export type ViewRequest = {
 
 /** A cross-section whose smaller side shows at least this large needs no magnifying, px. */
 const plainEnough = 26;
+/** A loop thinner than this is a single line, px. */
+const thinnestLoop = 2.5;
 
 /** The views that show a part of this kind at this scale. */
 export function partViews(request: ViewRequest, pxPerMm: number): PartView[] {
@@ -48,11 +50,13 @@ export function partViews(request: ViewRequest, pxPerMm: number): PartView[] {
 }
 
 function beltScale(request: ViewRequest, kind: BeltKind, pxPerMm: number): BeltScale {
-  const { sizes, large, sectionPxPerMm } = request;
+  const { sizes, large, sectionPxPerMm, sectionRoom } = request;
   const across = beltSection(kind, sizes);
-  if (large) return magnify(across, request.sectionRoom, pxPerMm, "the loop");
-  const scale = sectionPxPerMm ?? sectionScaleFor(across, request.sectionRoom);
-  return { magnification: scale / pxPerMm, caption: undefined };
+  const thick = kind === "flat-belt" ? sizes.or("thickness", 0.8) : across;
+  const hairline = thick * pxPerMm < thinnestLoop;
+  if (large) return { ...magnify(across, sectionRoom, pxPerMm, "the loop"), hairline };
+  const scale = sectionPxPerMm ?? sectionScaleFor(across, sectionRoom);
+  return { magnification: scale / pxPerMm, caption: undefined, hairline };
 }
 
 /** The larger side of a belt's cross-section, mm. */

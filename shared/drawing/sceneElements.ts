@@ -1,6 +1,6 @@
 import { outlinePath, round } from "./outlinePath";
-import type { MaterialLook, Scene, SceneItem, TextItem } from "./Scene";
-import { type ColourName, fills, rimOf, type Stroke, strokeOf } from "./sceneStyle";
+import type { LineRole, MaterialLook, Scene, SceneItem, TextItem } from "./Scene";
+import { type ColourName, fills, rimStroke, type Stroke, strokeOf } from "./sceneStyle";
 
 /** An SVG element with its attributes as React spells them. */
 export type SvgElement = { tag: string; attributes: Record<string, string | number>; children?: SvgElement[] };
@@ -12,7 +12,7 @@ export type Paint = {
   text: (item: TextItem) => SvgElement[];
 };
 
-const layers = ["area", "outline", "measured", "extension", "dimension", "text"] as const;
+const layers = ["area", "rim", "outline", "measured", "extension", "dimension", "text"] as const;
 
 /** What a scene looks like as SVG elements, hatch patterns first, painted from the back to the front. */
 export function sceneElements(scene: Scene, paint: Paint): SvgElement[] {
@@ -20,10 +20,15 @@ export function sceneElements(scene: Scene, paint: Paint): SvgElement[] {
     scene.items.flatMap((item) => (item.type === "area" && isPatterned(item) ? [item.material] : [])),
   );
   const patterns = [...used].map((material) => pattern(material, scene.fine, paint));
-  const painted = layers.flatMap((layer) =>
-    scene.items.filter((i) => layerOf(i) === layer).flatMap((i) => paintItem(i, scene.fine, paint)),
-  );
+  const painted = layers.flatMap((layer) => paintLayer(scene, layer, paint));
   return patterns.length > 0 ? [{ tag: "defs", attributes: {}, children: patterns }, ...painted] : painted;
+}
+
+function paintLayer(scene: Scene, layer: (typeof layers)[number], paint: Paint): SvgElement[] {
+  const { items, fine } = scene;
+  if (layer !== "rim") return items.filter((i) => layerOf(i) === layer).flatMap((i) => paintItem(i, fine, paint));
+  const measured = items.filter((i) => i.type === "contour" || i.type === "line").filter((i) => i.role === "measured");
+  return measured.map((i) => stroked(linePath(i), i.role, rimStroke(fine), paint));
 }
 
 function layerOf(item: SceneItem): (typeof layers)[number] {
@@ -51,11 +56,8 @@ function paintItem(item: SceneItem, fine: boolean, paint: Paint): SvgElement[] {
       ];
     }
     case "contour":
-      return stroked(outlinePath(item.outline), item.role, fine, paint);
-    case "line": {
-      const { from, to } = item;
-      return stroked(`M${round(from.x)} ${round(from.y)}L${round(to.x)} ${round(to.y)}`, item.role, fine, paint);
-    }
+    case "line":
+      return [stroked(linePath(item), item.role, strokeOf(item.role, fine), paint)];
     case "arrow":
       return [{ tag: "path", attributes: { d: arrowPath(item), fill: paint.colour("ink") } }];
     case "text":
@@ -63,21 +65,17 @@ function paintItem(item: SceneItem, fine: boolean, paint: Paint): SvgElement[] {
   }
 }
 
-function stroked(d: string, role: Parameters<typeof strokeOf>[0], fine: boolean, paint: Paint): SvgElement[] {
-  const rim = rimOf(role, fine);
-  const strokes: Stroke[] = rim ? [rim, strokeOf(role, fine)] : [strokeOf(role, fine)];
-  return strokes.map(({ colour, width, dash }) => ({
-    tag: "path",
-    attributes: {
-      d,
-      fill: "none",
-      stroke: paint.colour(colour),
-      strokeWidth: width,
-      ...(dash
-        ? { strokeDasharray: dash }
-        : { strokeLinecap: role === "outline" || role === "thin" ? "square" : "butt" }),
-    },
-  }));
+function stroked(d: string, role: LineRole, stroke: Stroke, paint: Paint): SvgElement {
+  const { colour, width, dash } = stroke;
+  const corner = role === "outline" || role === "thin" ? "square" : "butt";
+  const ends: SvgElement["attributes"] = dash ? { strokeDasharray: dash } : { strokeLinecap: corner };
+  return { tag: "path", attributes: { d, fill: "none", stroke: paint.colour(colour), strokeWidth: width, ...ends } };
+}
+
+function linePath(item: Extract<SceneItem, { type: "contour" | "line" }>): string {
+  if (item.type === "contour") return outlinePath(item.outline);
+  const { from, to } = item;
+  return `M${round(from.x)} ${round(from.y)}L${round(to.x)} ${round(to.y)}`;
 }
 
 /** Filled, a third as wide as long (ISO 129-1 leaves the angle between 15 and 90 degrees). */
@@ -93,7 +91,7 @@ function pattern(material: MaterialLook, fine: boolean, paint: Paint): SvgElemen
   const stroke = paint.colour(hatch);
   const common = { id: paint.patternId(material), width: size, height: size, patternUnits: "userSpaceOnUse" };
   const line = { tag: "path", attributes: { d: `M0 0V${size}`, stroke, strokeWidth: fine ? 0.9 : 1.1 } };
-  // Turning an upright line by 45 degrees clockwise leaves it falling to the left, as ISO 128-3 draws it.
+  // An upright line turned clockwise by 45 degrees rises to the right.
   if (kind === "lines") {
     return {
       tag: "pattern",
@@ -101,10 +99,18 @@ function pattern(material: MaterialLook, fine: boolean, paint: Paint): SvgElemen
       children: [line],
     };
   }
-  const dot = (x: number, y: number) => ({
+  // A cell of five specks, uneven enough not to read as lines.
+  const cell = size * 2;
+  const specks = [
+    [0.12, 0.2],
+    [0.55, 0.08],
+    [0.82, 0.44],
+    [0.34, 0.56],
+    [0.66, 0.86],
+  ] as const;
+  const dots = specks.map(([x, y]) => ({
     tag: "circle",
-    attributes: { cx: x, cy: y, r: fine ? 0.5 : 0.7, fill: stroke },
-  });
-  const dots = [dot(size * 0.2, size * 0.3), dot(size * 0.7, size * 0.75)];
-  return { tag: "pattern", attributes: { ...common, patternTransform: "rotate(20)" }, children: dots };
+    attributes: { cx: x * cell, cy: y * cell, r: fine ? 0.45 : 0.65, fill: stroke },
+  }));
+  return { tag: "pattern", attributes: { ...common, width: cell, height: cell }, children: dots };
 }

@@ -1,4 +1,4 @@
-import type { ContourItem, LineRole, MaterialLook, TextRole } from "./Scene";
+import type { LineRole, MaterialLook, TextRole } from "./Scene";
 
 /** Colours by what they mean; the client has a CSS variable of the same name (`--color-ink`), mail and paper a table. */
 export const colourNames = [
@@ -41,10 +41,9 @@ export function strokeOf(role: LineRole, fine: boolean): Stroke {
   return fine ? { ...strokes[role], ...fineStrokes[role] } : strokes[role];
 }
 
-/** Measured lines get a narrow rim of sheet colour, so that they can be seen on rubber and beside an ink line. */
-export function rimOf(role: ContourItem["role"], fine: boolean): Stroke | undefined {
-  if (role !== "measured") return undefined;
-  return { colour: "sheet", width: strokeOf(role, fine).width + (fine ? 1.4 : 2) };
+/** Measured lines lie on a rim of sheet colour, under the outlines, so that they can be seen on rubber. */
+export function rimStroke(fine: boolean): Stroke {
+  return { colour: "sheet", width: strokeOf("measured", fine).width + (fine ? 1.4 : 2) };
 }
 
 type Fill = {

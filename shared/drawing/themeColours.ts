@@ -23,7 +23,7 @@ export const themeColours: Record<DrawingTheme, Record<ColourName, string>> = {
     rubber: "#05090D",
     "rubber-hatch": "#76858F",
     metal: "#D9AE55",
-    "metal-fill": "#47391B",
+    "metal-fill": "#54441F",
     felt: "#46503F",
   },
 };

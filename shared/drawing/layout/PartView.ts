@@ -32,6 +32,8 @@ export type DimensionMark =
       middle: number;
       /** The feature's extent on the other axis: extension lines start at its end, as-found edges span it. */
       span: readonly [number, number];
+      /** Where extension lines start instead, on a curved feature. */
+      start?: number;
       sign?: DimensionSign;
     }
   /** A diameter at the bottom of a groove: arrows stand in the groove, the text at the right of the view. */

@@ -6,6 +6,7 @@ import type { PartView } from "./PartView";
 export type Sheet = {
   /** The part's views for a scale: what is magnified, and by how much, depends on it. */
   viewsAt: (pxPerMm: number) => PartView[];
+  /** Views stand above each other on one centre line, whatever the room. */
   projected: boolean;
   context: LayoutContext;
   gap: number;
@@ -14,42 +15,45 @@ export type Sheet = {
 };
 export type Fitted = { composition: Composition; pxPerMm: number; views: PartView[] };
 
-const step = 0.99;
+type Arrange = (views: number) => Arrangement;
+
+const beside: Arrange = (views) => [indices(views)];
+const stacked: Arrange = (views) => indices(views).map((i) => [i]);
+const detailBelow: Arrange = (views) => [indices(views).slice(0, 2), ...(views > 2 ? [indices(views).slice(2)] : [])];
+
+const step = 0.98;
 const least = 1e-4;
+/** Stacking views has to gain this much over setting them side by side. */
+const gain = 1.08;
 
 /** Lays the sheet out at the largest scale at which everything, words included, fits its box; at most `atMost`. */
 export function fitSheet(sheet: Sheet, atMost = Number.POSITIVE_INFINITY): Fitted {
   const top = Math.min(atMost, largestConceivable(sheet));
-  let best: Fitted | undefined;
-  for (const arrangement of arrangements(sheet.viewsAt(top).length, sheet.projected)) {
-    const fitted = descend(sheet, arrangement, top);
-    // Side by side is kept unless stacking really gains something.
-    if (!best || fitted.pxPerMm > best.pxPerMm * 1.08) best = fitted;
+  const [first, ...others] = sheet.projected ? [stacked] : [beside, detailBelow, stacked];
+  let best = descend(sheet, first!, top, 0)!;
+  for (const arrange of others) {
+    best = descend(sheet, arrange, top, best.pxPerMm * gain) ?? best;
   }
-  return best!;
+  return best;
 }
 
-function descend(sheet: Sheet, arrangement: Arrangement, top: number): Fitted {
+/** The largest scale not above `top` that fits, found from above; undefined once it is not more than `worthwhile`. */
+function descend(sheet: Sheet, arrange: Arrange, top: number, worthwhile: number): Fitted | undefined {
   let pxPerMm = top;
-  for (;;) {
+  while (pxPerMm > worthwhile) {
     const views = sheet.viewsAt(pxPerMm);
     const laid = views.map((view) => layOutView(view, pxPerMm, sheet.context));
-    const rows = arrangement.map((row) => row.filter((i) => i < laid.length)).filter((row) => row.length > 0);
-    for (let i = rows.flat().length; i < laid.length; i++) rows.push([i]);
-    const composition = compose(laid, rows, sheet.gap, sheet.projected);
-    const fits = composition.width <= sheet.width && composition.height <= sheet.height;
-    if (fits || pxPerMm < least) return { composition, pxPerMm, views };
-    // Words keep their size, so shrinking everything by the excess is never too much.
+    const composition = compose(laid, arrange(laid.length), sheet.gap, sheet.projected);
     const excess = Math.min(sheet.width / composition.width, sheet.height / composition.height);
+    if (excess >= 1 || pxPerMm < least) return { composition, pxPerMm, views };
+    // Words keep their size, so shrinking everything by the excess is never too much.
     pxPerMm *= Math.min(step, excess);
   }
+  return undefined;
 }
 
-function arrangements(views: number, projected: boolean): Arrangement[] {
-  if (projected) return [[...Array(views).keys()].map((i) => [i])];
-  if (views === 1) return [[[0]]];
-  if (views === 2) return [[[0, 1]], [[0], [1]]];
-  return [[[0, 1, 2]], [[0, 1], [2]], [[0], [1], [2]]];
+function indices(count: number): number[] {
+  return [...Array(count).keys()];
 }
 
 /** The scale at which the largest view alone would fill the box. */

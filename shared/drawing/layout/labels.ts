@@ -36,8 +36,10 @@ export function dimensionLabel(
   }
   if (found && (full || !stated)) {
     const { nominal } = dimensionText({ nominalMm: found }, unit);
+    const own = stated ? {} : signed;
     lines.push({
-      content: full ? `yours ${nominal}` : nominal,
+      content: full ? (stated ? `yours ${nominal}` : `${nominal} yours`) : nominal,
+      ...own,
       role: "measured",
       size: full ? words + 1 : digits,
       weight: 600,

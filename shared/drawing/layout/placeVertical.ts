@@ -29,7 +29,7 @@ export function placeVertical(
     const [from, to] = edges[i]!;
     const middle = (from + to) / 2;
     const along = dimensionLabel(mark.name, sizes, unit, style, { sign: mark.sign })!;
-    const start = (out < 0 ? mark.span[0] : mark.span[1]) * scale;
+    const start = (mark.start ?? (out < 0 ? mark.span[0] : mark.span[1])) * scale;
     const stands = to - from >= along.width + 8;
     const beyond = edges.slice(i + 1).flat();
 

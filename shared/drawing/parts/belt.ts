@@ -19,7 +19,12 @@ function loop(insideCircumference: number, grow = 0): Extract<Outline, { shape: 
   return { shape: "stadium", centre: origin, radius: radius + grow, straight: radius * straightPerRadius };
 }
 
-export type BeltScale = { magnification: number; caption: string | undefined };
+export type BeltScale = {
+  magnification: number;
+  caption: string | undefined;
+  /** The loop is thinner than a drawn line: only its inside edge is drawn. */
+  hairline?: boolean;
+};
 
 /**
  * A belt: its loop at the scale of the drawing, lying open, and its cross-section magnified.
@@ -39,9 +44,11 @@ export function beltViews(
   const view = emptyView();
   const inner = loop(circumference);
   const outer = loop(circumference, thick);
-  view.areas.push({ material, cut: false, outlines: [outer, inner], thinnest: thick });
   const role = sizes.role("insideCircumference");
-  view.contours.push({ role, outline: outer });
+  if (!scale.hairline) {
+    view.areas.push({ material, cut: false, outlines: [outer, inner], thinnest: thick });
+    view.contours.push({ role, outline: outer });
+  }
   view.contours.push({ role, outline: inner, dimension: "insideCircumference" });
   const found = sizes.found("insideCircumference");
   if (found) view.contours.push({ role: "measured", outline: loop(found), dimension: "insideCircumference" });

@@ -51,24 +51,22 @@ function ringSection(
   const middle = inner / 2 + tall / 2;
   const beyond = sizes.role(round ? "section" : "width");
   // The half of the ring behind the cut shows its two sides.
-  view.areas.push({ material, cut: false, outlines: [behind(wide, middle)], thinnest: wide });
   for (const end of [-1, 1]) addLine(view, beyond, (end * wide) / 2, -middle, (end * wide) / 2, middle);
   for (const up of [-1, 1]) addCut(view, { sizes, material, inner, round, wide, tall }, up * middle);
   addAxis(view, "x", -wide / 2, wide / 2);
-  const span = round ? ([0, wide / 2] as const) : ([-wide / 2, wide / 2] as const);
-  view.marks.push({ mark: "linear", name: "insideDiameter", side: "right", middle: 0, span, sign: "diameter" });
+  const span = [-wide / 2, wide / 2] as const;
+  const start = round ? { start: 0 } : {};
+  view.marks.push({
+    mark: "linear",
+    name: "insideDiameter",
+    side: "right",
+    middle: 0,
+    span,
+    ...start,
+    sign: "diameter",
+  });
   if (dimensioned) addCutMarks(view, { sizes, material, inner, round, wide, tall }, -middle, large);
   return view;
-}
-
-function behind(wide: number, middle: number) {
-  const points = [
-    { x: -wide / 2, y: -middle },
-    { x: wide / 2, y: -middle },
-    { x: wide / 2, y: middle },
-    { x: -wide / 2, y: middle },
-  ];
-  return { shape: "polygon" as const, points };
 }
 
 function addCut(view: PartView, { sizes, material, round, wide, tall }: Ring, y: number): void {

@@ -77,8 +77,12 @@ function section({ sizes, outer, bore, tread, height, second, rim, hub }: Wheel,
     });
   }
   if (large) {
-    addLine(view, "thin", hubLeft, -bore / 2, hubLeft, bore / 2);
-    addLine(view, "thin", hubRight, -bore / 2, hubRight, bore / 2);
+    // Edges behind the cut: the ends of the bore, and the rim where nothing stands before it.
+    for (const end of [hubLeft, hubRight]) addLine(view, "thin", end, -bore / 2, end, bore / 2);
+    for (const up of [-1, 1]) {
+      addLine(view, "thin", -tread / 2, up * rim, -tread / 2, up * hub);
+      if (second === undefined) addLine(view, "thin", tread / 2, up * rim, tread / 2, up * hub);
+    }
   }
   addAxis(view, "x", Math.min(hubLeft, -tread / 2), Math.max(hubRight, tread / 2 + step));
 
