@@ -39,15 +39,8 @@ export const integer = (min = 0, max = Number.MAX_SAFE_INTEGER) =>
 
 export const flag = () => z.enum(["true", "false"]).transform((value) => value === "true");
 
-/** A list, whichever way the form parser hands it over (many indices come as an object). */
-export const list = <Item extends z.ZodType>(item: Item, max = 100) =>
-  z.preprocess(
-    (value) =>
-      value !== null && typeof value === "object" && Object.keys(value).every((key) => /^\d+$/.test(key))
-        ? Object.values(value)
-        : value,
-    z.array(item).max(max),
-  );
+/** A list of at most `max` items. */
+export const list = <Item extends z.ZodType>(item: Item, max = 100) => z.array(item).max(max);
 
 /** Limits from https://docs.stripe.com/api/metadata: 50 keys of up to 40 characters, values of up to 500. */
 export const metadata = () =>
