@@ -1,0 +1,45 @@
+import { Suspense, useEffect, useRef } from "react";
+import { Outlet, ScrollRestoration, useLocation } from "react-router-dom";
+import { Footer } from "./Footer";
+import { Header } from "./Header";
+import { LiveRegion } from "./LiveRegion";
+
+/** Moves focus to a new page's content, so that a keyboard or a screen reader does not stay on the link that led there. */
+function useFocusOnNewPage() {
+  const main = useRef<HTMLElement>(null);
+  const { pathname } = useLocation();
+  const seen = useRef(pathname);
+  useEffect(() => {
+    if (seen.current === pathname) return;
+    seen.current = pathname;
+    main.current?.focus({ preventScroll: true });
+  }, [pathname]);
+  return main;
+}
+
+export function Layout() {
+  const main = useFocusOnNewPage();
+  return (
+    <div className="flex min-h-dvh flex-col">
+      <a
+        href="#main"
+        className="absolute left-2 z-30 -translate-y-20 bg-ink px-4 py-3 text-ground focus:translate-y-2"
+        onClick={(event) => {
+          event.preventDefault();
+          main.current?.focus();
+        }}
+      >
+        Skip to the content
+      </a>
+      <Header />
+      <main id="main" ref={main} tabIndex={-1} className="flex-1">
+        <Suspense fallback={<div className="min-h-dvh" />}>
+          <Outlet />
+        </Suspense>
+      </main>
+      <Footer />
+      <LiveRegion />
+      <ScrollRestoration />
+    </div>
+  );
+}

@@ -1,0 +1,29 @@
+import { queryOptions, useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import type { Basket, PutBasketLine } from "#shared/schemas/basket";
+import { api } from "./api";
+import { useShipTo } from "./preferences";
+
+export const basketKeys = { all: ["basket"] as const, to: (shipTo: string) => ["basket", shipTo] as const };
+
+/** The basket with postage to this country. */
+export const basketQuery = (shipTo: string) =>
+  queryOptions({
+    queryKey: basketKeys.to(shipTo),
+    queryFn: ({ signal }) => api<Basket>(`/basket?shipTo=${encodeURIComponent(shipTo)}`, { signal }),
+  });
+
+/** Pieces in the basket; undefined while it is not known. */
+export function useBasketCount(): number | undefined {
+  return useQuery(basketQuery(useShipTo())).data?.count;
+}
+
+type Put = PutBasketLine & { partId: string };
+
+/** Sets how many of a part lie in the basket, and has every view of the basket follow. */
+export function usePutInBasket() {
+  const queryClient = useQueryClient();
+  return useMutation({
+    mutationFn: ({ partId, ...line }: Put) => api<unknown>(`/basket/lines/${partId}`, { method: "PUT", body: line }),
+    onSuccess: () => queryClient.invalidateQueries({ queryKey: basketKeys.all }),
+  });
+}
