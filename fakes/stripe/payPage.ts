@@ -41,7 +41,7 @@ function linesTable(session: Stripe.Checkout.Session, lines: readonly Stripe.Lin
   );
   return html`<table>
 <caption>Order reference: <strong>${session.client_reference_id ?? "none given"}</strong></caption>
-<thead><tr><th scope="col">Line</th><th scope="col" class="sum">Quantity</th><th scope="col" class="sum">Amount</th></tr></thead>
+<thead><tr><th scope="col">Line</th><th scope="col" class="sum">Qty</th><th scope="col" class="sum">Amount</th></tr></thead>
 <tbody>
 ${rows}</tbody>
 <tfoot><tr><th scope="row" colspan="2">Total</th><td class="sum">${moneyText(session.amount_total!, session.currency!)}</td></tr></tfoot>

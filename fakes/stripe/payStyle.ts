@@ -16,6 +16,7 @@ caption { text-align: left; padding: .25rem 0; }
 th, td { padding: .5rem; text-align: left; vertical-align: top; border-bottom: 1px solid #8a968f; overflow-wrap: anywhere; }
 .sum { text-align: right; white-space: nowrap; }
 tfoot th, tfoot td { border-bottom: 0; font-weight: 700; font-size: 1.125rem; }
+tbody th { font-weight: 400; }
 form { margin: 1rem 0; }
 form p { margin: .25rem 0 0; }
 button, .button { display: inline-block; min-height: 2.75rem; padding: .5rem 1.25rem; font: inherit; font-weight: 700;
