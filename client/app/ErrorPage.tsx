@@ -1,17 +1,13 @@
-import { isRouteErrorResponse, Link, useRouteError } from "react-router-dom";
+import { Link } from "react-router-dom";
 import { ApiProblem } from "../lib/ApiProblem";
 import { useTitle } from "../lib/useTitle";
 import { Button } from "../ui/Button";
 import { NotFoundPage } from "./NotFoundPage";
 
-const isMissing = (error: unknown) =>
-  (error instanceof ApiProblem || isRouteErrorResponse(error)) && error.status === 404;
-
 /** Shown in place of a page that broke. */
-export function ErrorPage() {
-  const error = useRouteError();
+export function ErrorPage({ error }: { error: unknown }) {
   useTitle("Something went wrong");
-  if (isMissing(error)) return <NotFoundPage />;
+  if (error instanceof ApiProblem && error.status === 404) return <NotFoundPage />;
   return (
     <div role="alert" className="page grid justify-items-start gap-4 py-16">
       <h1>This page could not be shown</h1>

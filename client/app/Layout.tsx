@@ -1,8 +1,10 @@
 import { Suspense, useEffect, useRef } from "react";
-import { Outlet, ScrollRestoration, useLocation } from "react-router-dom";
+import { Outlet, useLocation } from "react-router-dom";
+import { ErrorBoundary } from "./ErrorBoundary";
 import { Footer } from "./Footer";
 import { Header } from "./Header";
 import { LiveRegion } from "./LiveRegion";
+import { useScrollPosition } from "./useScrollPosition";
 
 /** Moves focus to a new page's content, so that a keyboard or a screen reader does not stay on the link that led there. */
 function useFocusOnNewPage() {
@@ -19,27 +21,23 @@ function useFocusOnNewPage() {
 
 export function Layout() {
   const main = useFocusOnNewPage();
+  const { pathname } = useLocation();
+  useScrollPosition();
   return (
     <div className="flex min-h-dvh flex-col">
-      <a
-        href="#main"
-        className="absolute left-2 z-30 -translate-y-20 bg-ink px-4 py-3 text-ground focus:translate-y-2"
-        onClick={(event) => {
-          event.preventDefault();
-          main.current?.focus();
-        }}
-      >
+      <a href="#main" className="absolute left-2 z-30 -translate-y-20 bg-ink px-4 py-3 text-ground focus:translate-y-2">
         Skip to the content
       </a>
       <Header />
       <main id="main" ref={main} tabIndex={-1} className="flex-1">
-        <Suspense fallback={<div className="min-h-dvh" />}>
-          <Outlet />
-        </Suspense>
+        <ErrorBoundary resetKey={pathname}>
+          <Suspense fallback={<div className="min-h-dvh" />}>
+            <Outlet />
+          </Suspense>
+        </ErrorBoundary>
       </main>
       <Footer />
       <LiveRegion />
-      <ScrollRestoration />
     </div>
   );
 }

@@ -14,4 +14,3 @@ export function NotFoundPage() {
     </div>
   );
 }
-export { NotFoundPage as Component };

@@ -8,4 +8,3 @@ export function HomePage() {
     </div>
   );
 }
-export { HomePage as Component };

@@ -8,4 +8,3 @@ export function ResultsPage() {
     </div>
   );
 }
-export { ResultsPage as Component };
