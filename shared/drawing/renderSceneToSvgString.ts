@@ -1,9 +1,10 @@
 import { escapeXml } from "./escapeXml";
 import { outlineText } from "./outlineText";
 import type { Scene } from "./Scene";
-import { type SvgElement, sceneElements } from "./sceneElements";
+import { sceneElements } from "./sceneElements";
 import { textColour } from "./sceneStyle";
 import { type DrawingTheme, themeColours } from "./themeColours";
+import { writeSvgElement } from "./writeSvgElement";
 
 export type SvgStringOptions = {
   /** Paints the sheet behind the drawing; leave it off for a transparent picture. */
@@ -29,20 +30,6 @@ export function renderSceneToSvgString(scene: Scene, theme: DrawingTheme, option
   return (
     `<svg xmlns="http://www.w3.org/2000/svg" width="${width}" height="${height}" viewBox="0 0 ${width} ${height}" role="img">` +
     `<title>${escapeXml(title)}</title><desc>${escapeXml(description)}</desc>` +
-    `${sheet}${elements.map(write).join("")}</svg>`
+    `${sheet}${elements.map(writeSvgElement).join("")}</svg>`
   );
-}
-
-function write({ tag, attributes, children = [] }: SvgElement): string {
-  if (tag === "#text") return escapeXml(String(attributes.content));
-  const written = Object.entries(attributes).map(
-    ([name, value]) => ` ${attributeName(name)}="${escapeXml(String(value))}"`,
-  );
-  return `<${tag}${written.join("")}>${children.map(write).join("")}</${tag}>`;
-}
-
-/** React's spelling to SVG's: only presentation attributes are hyphenated there. */
-function attributeName(name: string): string {
-  if (name === "patternUnits" || name === "patternTransform") return name;
-  return name.replace(/[A-Z]/g, (letter) => `-${letter.toLowerCase()}`);
 }

@@ -16,10 +16,14 @@ const row: DrawingStyle = { fine: true, digits: 12, words: 12, arrow: 6, clear: 
 const desk: DrawingStyle = { fine: false, digits: 15, words: 12, arrow: 9, clear: 15, between: 12, full: true };
 const phone: DrawingStyle = { ...desk, digits: 13, arrow: 8, clear: 12, between: 10 };
 
-/** Below this width (px) a large drawing takes the smaller sizes. */
+const smallPhone: DrawingStyle = { ...phone, digits: 12, words: 11, arrow: 7, clear: 9, between: 6 };
+
+/** Below these widths (px) a large drawing takes smaller sizes. */
 const narrow = 520;
+const narrowest = 330;
 
 export function styleFor(view: "row" | "large", width: number): DrawingStyle {
   if (view === "row") return row;
+  if (width < narrowest) return smallPhone;
   return width < narrow ? phone : desk;
 }

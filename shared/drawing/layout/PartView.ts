@@ -37,7 +37,7 @@ export type DimensionMark =
       sign?: DimensionSign;
     }
   /** A diameter at the bottom of a groove: arrows stand in the groove, the text at the right of the view. */
-  | { mark: "groove"; name: DimensionName; sign?: DimensionSign; halfWidth: number }
+  | { mark: "groove"; name: DimensionName; sign?: DimensionSign }
   /** A circumference, written inside the loop where there is room and below it where not. */
   | { mark: "loop"; name: DimensionName; radius: number; straight: number; outer: number }
   /** Words at the right of the view, for a small drawing. */

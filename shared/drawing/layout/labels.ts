@@ -36,14 +36,10 @@ export function dimensionLabel(
   }
   if (found && (full || !stated)) {
     const { nominal } = dimensionText({ nominalMm: found }, unit);
-    const own = stated ? {} : signed;
-    lines.push({
-      content: full ? (stated ? `yours ${nominal}` : `${nominal} yours`) : nominal,
-      ...own,
-      role: "measured",
-      size: full ? words + 1 : digits,
-      weight: 600,
-    });
+    const line = { role: "measured", size: full ? words + 1 : digits, weight: 600 } as const;
+    if (stated) lines.push({ ...line, content: `yours ${nominal}` });
+    else lines.push({ ...line, content: full && !stacked ? `${nominal} yours` : nominal, ...signed });
+    if (!stated && full && stacked) lines.push({ ...line, content: "yours", size: words, weight: 500 });
   }
   return lines.length === 0 ? undefined : label(lines);
 }

@@ -1,4 +1,4 @@
-import type { SceneItem } from "../Scene";
+import type { Box, SceneItem } from "../Scene";
 import { dimensionLabel, setLabel } from "./labels";
 import type { LayoutContext } from "./layOutView";
 import type { DimensionMark } from "./PartView";
@@ -7,6 +7,7 @@ import type { DimensionMark } from "./PartView";
 export function placeGroove(
   mark: Extract<DimensionMark, { mark: "groove" }>,
   scale: number,
+  part: Box,
   { sizes, unit, style }: LayoutContext,
 ): SceneItem[] {
   const value = sizes.known(mark.name);
@@ -14,7 +15,7 @@ export function placeGroove(
   if (value === undefined || !words) return [];
   const half = (value / 2) * scale;
   const tail = style.arrow + 6;
-  const rim = Math.max(mark.halfWidth * scale, half + tail) + style.clear;
+  const rim = Math.max(part.x + part.width, half + tail) + style.clear;
   return [
     { type: "line", role: "dimension", from: { x: half, y: 0 }, to: { x: rim, y: 0 }, dimension: mark.name },
     { type: "line", role: "dimension", from: { x: -half - tail, y: 0 }, to: { x: -half, y: 0 } },

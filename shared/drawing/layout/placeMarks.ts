@@ -25,7 +25,7 @@ export function placeMarks(
   const all = (): Box => around([part, ...items.map(boxOfItem)])!;
   for (const mark of marks) {
     if (mark.mark === "loop") items.push(...placeLoop(mark, scale, context));
-    if (mark.mark === "groove") items.push(...placeGroove(mark, scale, context));
+    if (mark.mark === "groove") items.push(...placeGroove(mark, scale, part, context));
     if (mark.mark === "beside") items.push(...placeBeside(mark, part, context));
   }
   const linear = marks.filter((mark) => mark.mark === "linear");

@@ -116,6 +116,8 @@ function face({ sizes, outer, bore, second, rim, hub }: Wheel): PartView {
   view.contours.push({ role: "thin", outline: circle(rim) }, { role: "thin", outline: circle(hub) });
   if (second !== undefined) {
     const boss = Math.max(second / 2 - treadDepth(second, bore), hub);
+    // Where the second tread is the larger one, its boss shows around the first.
+    if (boss > outer / 2) addRing(view, "metal", boss, outer / 2);
     addRing(view, "rubber", second / 2, boss);
     view.contours.push({ role: "thin", outline: circle(boss) });
     addDiameter(view, sizes, "secondTreadDiameter", second);

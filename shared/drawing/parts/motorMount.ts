@@ -41,7 +41,7 @@ export function motorMountViews(sizes: PartSizes, large: boolean, material: Mate
   });
   section.marks.push({ mark: "linear", name: "grooveWidth", side: "left", middle: 0, span: rim });
   section.marks.push({ mark: "linear", name: "height", side: "left", middle: 0, span: rim });
-  section.marks.push({ mark: "groove", name: "grooveDiameter", sign: "diameter", halfWidth: outer / 2 });
+  section.marks.push({ mark: "groove", name: "grooveDiameter", sign: "diameter" });
 
   const face = emptyView();
   addRing(face, material, outer / 2, inner / 2);
