@@ -1,0 +1,23 @@
+import type { ParcelState } from "../schemas/order";
+
+/**
+ * What a parcel may become next (product.md, "States").
+ *
+ * Only parcels with a re-mould pass through the core's states; a refused core may be followed by another one. A workshop
+ * declines before it begins; a parcel is cancelled at any time before it has left.
+ */
+const next: Record<ParcelState, readonly ParcelState[]> = {
+  "to-accept": ["core-awaited", "in-work", "declined", "cancelled"],
+  "core-awaited": ["core-received", "cancelled"],
+  "core-received": ["core-refused", "in-work", "cancelled"],
+  "core-refused": ["core-awaited", "cancelled"],
+  "in-work": ["ready", "cancelled"],
+  ready: ["dispatched", "cancelled"],
+  dispatched: ["delivered"],
+  delivered: ["closed"],
+  closed: [],
+  declined: [],
+  cancelled: [],
+};
+
+export const parcelMayBecome = (from: ParcelState, to: ParcelState): boolean => next[from].includes(to);
