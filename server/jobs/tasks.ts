@@ -1,11 +1,18 @@
 import type { Task } from "graphile-worker";
+import { applyPaymentEvent } from "../commands/applyPaymentEvent";
+import { expireOrder } from "../commands/expireOrder";
+import { refundOrder } from "../commands/refundOrder";
 import type { Services } from "../Services";
 import type { Jobs } from "./addJob";
 
 type Work<Name extends keyof Jobs> = (services: Services, payload: Jobs[Name]) => Promise<void>;
 
 /** What each job does. A job may run again after a crash, so each is safe to repeat. */
-const work: { [Name in keyof Jobs]?: Work<Name> } = {};
+const work: { [Name in keyof Jobs]?: Work<Name> } = {
+  expireOrder: (services, { orderId }) => expireOrder(services, orderId),
+  applyPaymentEvent: (services, { eventId }) => applyPaymentEvent(services, eventId),
+  refundOrder: (services, { orderId, reason }) => refundOrder(services, orderId, reason),
+};
 
 /** The jobs as the queue's runner takes them. */
 export function tasksOf(services: Services): Record<string, Task> {
