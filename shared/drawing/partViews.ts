@@ -1,5 +1,4 @@
 import type { PartKind } from "#shared/domain/partKinds";
-import { roundBelow } from "./layout/footer";
 import type { PartView } from "./layout/PartView";
 import { type BeltKind, type BeltScale, beltViews } from "./parts/belt";
 import { driveRingViews } from "./parts/driveRing";
@@ -8,6 +7,7 @@ import { motorMountViews } from "./parts/motorMount";
 import type { PartSizes } from "./parts/PartSizes";
 import { brakePadViews, clutchFeltViews } from "./parts/pads";
 import { pinchRollerViews } from "./parts/pinchRoller";
+import { roundBelow } from "./roundBelow";
 import type { MaterialLook } from "./Scene";
 
 export type ViewRequest = {

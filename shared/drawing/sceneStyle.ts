@@ -16,7 +16,7 @@ export type ColourName = (typeof colourNames)[number];
 
 export type Stroke = { colour: ColourName; width: number; dash?: string };
 
-/** Wide lines are twice the narrow ones (ISO 128-2); centre lines are long-dash dot. */
+/** Wide lines are twice the narrow ones, centre lines are long-dash dot (ISO 128-2:2020, basic line types; from memory). */
 const strokes: Record<LineRole, Stroke> = {
   outline: { colour: "ink", width: 1.8 },
   thin: { colour: "ink", width: 0.9 },
@@ -53,7 +53,10 @@ type Fill = {
   pattern: "lines" | "dots";
 };
 
-/** Adjacent materials are hatched in different directions (ISO 128-3); felt and cork are stippled too, cut or not. */
+/**
+ * Adjacent materials are hatched at 45 degrees in opposite directions (ISO 128-3:2020, cuts and sections; from memory);
+ * felt and cork are stippled, cut or not.
+ */
 export const fills: Record<MaterialLook, Fill> = {
   rubber: { base: "rubber", hatch: "rubber-hatch", angle: 45, pattern: "lines" },
   metal: { base: "metal-fill", hatch: "metal", angle: 135, pattern: "lines" },

@@ -43,6 +43,8 @@ export type DimensionMark =
   /** Words at the right of the view, for a small drawing. */
   | { mark: "beside"; names: readonly DimensionName[]; sign?: DimensionSign };
 
+export type LinearMark = Extract<DimensionMark, { mark: "linear" }>;
+
 export function emptyView(magnification = 1): PartView {
   return { magnification, areas: [], contours: [], lines: [], marks: [] };
 }

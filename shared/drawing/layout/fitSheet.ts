@@ -1,6 +1,7 @@
 import { around, boxOfOutline, boxOfPoints } from "./boxOfItem";
 import { type Arrangement, type Composition, compose } from "./compose";
-import { type LayoutContext, layOutView } from "./layOutView";
+import type { LayoutContext } from "./LayoutContext";
+import { layOutView } from "./layOutView";
 import type { PartView } from "./PartView";
 
 export type Sheet = {

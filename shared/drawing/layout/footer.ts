@@ -1,11 +1,11 @@
 import type { LengthUnit } from "../dimensionText";
+import { roundBelow } from "../roundBelow";
 import type { LineRole, SceneItem } from "../Scene";
 import type { DrawingStyle } from "./DrawingStyle";
 import { type Label, label, setLabel } from "./labels";
 
 export type Footer = { height: number; draw: (pxPerMm: number, top: number) => SceneItem[] };
 
-const barLeast = 36;
 const barMost = 110;
 
 /**
@@ -40,7 +40,7 @@ export function footer(roles: ReadonlySet<LineRole>, width: number, unit: Length
 function scaleBar(pxPerMm: number, unit: LengthUnit, style: DrawingStyle, y: number): SceneItem[] {
   const perUnit = pxPerMm * (unit === "mm" ? 1 : 25.4);
   const length = roundBelow(barMost / perUnit);
-  const px = Math.max(length * perUnit, Math.min(barLeast, barMost));
+  const px = length * perUnit;
   const tick = (x: number, tall: number): SceneItem => ({
     type: "line",
     role: "scale",
@@ -49,18 +49,10 @@ function scaleBar(pxPerMm: number, unit: LengthUnit, style: DrawingStyle, y: num
   });
   const words = label([{ content: `${length} ${unit}`, role: "note", size: style.words, weight: 500 }]);
   return [
-    { type: "line", role: "scale", from: { x: 0, y }, to: { x: length * perUnit, y } },
+    { type: "line", role: "scale", from: { x: 0, y }, to: { x: px, y } },
     tick(0, 4),
-    tick((length * perUnit) / 2, 2.5),
-    tick(length * perUnit, 4),
+    tick(px / 2, 2.5),
+    tick(px, 4),
     ...setLabel(words, { x: px + 8, y: y - words.height / 2 }),
   ];
-}
-
-/** The largest 1, 2 or 5 times a power of ten that is not above `limit`. */
-export function roundBelow(limit: number): number {
-  const power = 10 ** Math.floor(Math.log10(limit));
-  const lead = limit / power;
-  const digit = lead >= 5 ? 5 : lead >= 2 ? 2 : 1;
-  return Number((digit * power).toPrecision(1));
 }

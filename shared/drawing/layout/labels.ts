@@ -31,7 +31,7 @@ export function dimensionLabel(
     const beside = full && tolerance && !stacked ? ` ${tolerance}` : "";
     lines.push({ content: nominal + beside, role: "stated", size: digits, weight: 600, ...signed });
     if (full && tolerance && stacked) {
-      lines.push({ content: tolerance, role: "tolerance", size: Math.max(words, digits - 2), weight: 500 });
+      lines.push({ content: tolerance, role: "tolerance", size: digits, weight: 500 });
     }
   }
   if (found && (full || !stated)) {

@@ -1,18 +1,16 @@
 import type { DimensionName } from "#shared/domain/partKinds";
-import type { LengthUnit } from "../dimensionText";
 import type { PartSizes } from "../parts/PartSizes";
 import type { Box, Point, SceneItem } from "../Scene";
 import { around, boxOfItem } from "./boxOfItem";
-import type { DrawingStyle } from "./DrawingStyle";
+import type { LayoutContext } from "./LayoutContext";
 import { label, setLabel } from "./labels";
 import { mapOutline } from "./moveItem";
 import type { DimensionMark, PartView } from "./PartView";
 import { placeMarks } from "./placeMarks";
 
 export type LaidView = { items: SceneItem[]; box: Box };
-export type LayoutContext = { sizes: PartSizes; unit: LengthUnit; style: DrawingStyle };
 
-/** A section wall thinner than this on the screen is filled, not hatched (ISO 128-3, thin sections), px. */
+/** A section wall thinner than this on the screen is filled, not hatched (thin sections, ISO 128-3:2020; from memory), px. */
 const thinnestHatched = 5;
 /** Measured edges run past the feature by this much, px. */
 const measuredOverhang = 6;

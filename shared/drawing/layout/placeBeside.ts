@@ -1,7 +1,7 @@
 import { dimensionText } from "../dimensionText";
 import type { Box, SceneItem } from "../Scene";
+import type { LayoutContext } from "./LayoutContext";
 import { label, setLabel } from "./labels";
-import type { LayoutContext } from "./layOutView";
 import type { DimensionMark } from "./PartView";
 
 /** A small cross-section's sizes as words at its right, such as "5.0 × 0.6"; nothing where none is stated. */

@@ -1,6 +1,6 @@
 import type { Box, SceneItem } from "../Scene";
+import type { LayoutContext } from "./LayoutContext";
 import { dimensionLabel, setLabel } from "./labels";
-import type { LayoutContext } from "./layOutView";
 import type { DimensionMark } from "./PartView";
 
 /** The diameter at the bottom of a groove: two arrows inside the groove, one of them drawn out to the text. */

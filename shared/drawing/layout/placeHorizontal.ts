@@ -1,8 +1,8 @@
 import type { Box, SceneItem } from "../Scene";
 import { arrowsFit, dimensionLine, extensionLine, extensionPast, tailLength } from "./dimensionLine";
+import type { LayoutContext } from "./LayoutContext";
 import { dimensionLabel, setLabel } from "./labels";
-import type { LayoutContext } from "./layOutView";
-import type { LinearMark } from "./placeMarks";
+import type { LinearMark } from "./PartView";
 
 /**
  * Dimensions of widths, in tiers above or below a view. The text stands above its line. Below the view, where the

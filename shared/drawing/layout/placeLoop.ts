@@ -1,7 +1,7 @@
 import { dimensionWords } from "#shared/domain/partKinds";
 import type { SceneItem } from "../Scene";
+import type { LayoutContext } from "./LayoutContext";
 import { dimensionLabel, type Label, label, setLabel } from "./labels";
-import type { LayoutContext } from "./layOutView";
 import type { DimensionMark } from "./PartView";
 
 const gap = 5;

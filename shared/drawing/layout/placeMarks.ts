@@ -1,16 +1,17 @@
 import type { Box, SceneItem } from "../Scene";
 import { around, boxOfItem } from "./boxOfItem";
-import type { LayoutContext } from "./layOutView";
-import type { DimensionMark, Side } from "./PartView";
+import type { LayoutContext } from "./LayoutContext";
+import type { DimensionMark, LinearMark, Side } from "./PartView";
 import { placeBeside } from "./placeBeside";
 import { placeGroove } from "./placeGroove";
 import { placeHorizontal } from "./placeHorizontal";
 import { placeLoop } from "./placeLoop";
 import { placeVertical } from "./placeVertical";
 
-export type LinearMark = Extract<DimensionMark, { mark: "linear" }>;
-
 /**
+ * Placing follows ISO 129-1:2018: text above its line, read from the bottom or from the right of the sheet, one height
+ * for sizes and tolerances.
+ *
  * Sets all dimensions of a view around it, in tiers: shorter lengths nearer to the part (ISO 129-1), so that no
  * dimension line is crossed. The tiers at the sides are set first; those above and below clear everything set so far,
  * which is why no two labels can meet at a corner.

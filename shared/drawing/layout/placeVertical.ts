@@ -1,8 +1,8 @@
 import type { Box, SceneItem } from "../Scene";
 import { dimensionLine, extensionLine, extensionPast } from "./dimensionLine";
+import type { LayoutContext } from "./LayoutContext";
 import { dimensionLabel, setLabel } from "./labels";
-import type { LayoutContext } from "./layOutView";
-import type { LinearMark } from "./placeMarks";
+import type { LinearMark } from "./PartView";
 
 /**
  * Dimensions of heights, in tiers going outwards at one side of a view. The text stands along its line where the

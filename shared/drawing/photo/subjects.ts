@@ -3,8 +3,9 @@ import { isRoundRing } from "../parts/driveRing";
 import type { PartSizes } from "../parts/PartSizes";
 import type { Camera } from "./camera";
 import type { PhotoCanvas } from "./PhotoCanvas";
+import { paintBlock } from "./paintBlock";
 import { circleLoop, fallenLoop, paintCord } from "./paintLoop";
-import { paintBlock, paintCylinder, paintHole, paintShadow, paintSheen } from "./paintSolids";
+import { paintCylinder, paintHole, paintShadow, paintSheen } from "./paintSolids";
 import { paintSpecks } from "./paintSpecks";
 
 export type SubjectContext = { canvas: PhotoCanvas; body: string; metal: string; paper: string; chance: () => number };
