@@ -9,6 +9,8 @@ export async function audit(
     subjectType: string;
     subjectId: string;
     detail?: Record<string, unknown>;
+    /** When it happened, where that is not now. */
+    at?: Date;
   },
   transaction: Transaction,
 ): Promise<void> {
