@@ -14,5 +14,5 @@ export async function audit(
   },
   transaction: Transaction,
 ): Promise<void> {
-  await AuditEntry.create({ ...entry, detail: entry.detail ?? {} }, { transaction });
+  await AuditEntry.create({ at: new Date(), detail: {}, ...entry }, { transaction });
 }
