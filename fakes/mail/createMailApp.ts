@@ -16,7 +16,8 @@ export function createMailApp(mailbox: Mailbox): Express {
     res.set({
       "Content-Security-Policy": PAGE_POLICY,
       "X-Content-Type-Options": "nosniff",
-      "Referrer-Policy": "no-referrer",
+      // "no-referrer" would also blank the origin of this page's own form (Fetch standard, "append a request Origin").
+      "Referrer-Policy": "same-origin",
       "Cache-Control": "no-store",
     });
     next();

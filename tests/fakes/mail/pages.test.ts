@@ -124,7 +124,9 @@ describe("the mail fake's pages", () => {
     expect((await post("null")).status).toBe(403);
     expect(fake.messages()).toHaveLength(1);
 
-    const { document } = await page("/");
+    const { res, document } = await page("/");
+    // With "no-referrer" browsers send the form with origin "null", which is refused above.
+    expect(res.headers.get("referrer-policy")).toBe("same-origin");
     const form = document.querySelector("form");
     expect([form?.method, form?.getAttribute("action"), form?.querySelector("button")?.textContent]).toEqual([
       "post",
