@@ -26,9 +26,9 @@ const historyWords: Record<string, string> = {
   "payment-mismatch": "A payment does not match this order; we are looking into it",
 };
 
-function presentLine({ id, partId, title, listing, forNeed, ...line }: OrderLine) {
-  const { quantity, unitMinor, lineMinor, taxMinor, madeToSize } = line;
-  const { kind, dimensions } = listing;
+function presentLine(line: OrderLine) {
+  const { id, partId, title, forNeed, quantity, unitMinor, lineMinor, taxMinor, madeToSize } = line;
+  const { kind, dimensions } = line.listing;
   return { id, partId, title, kind, dimensions, forNeed, quantity, unitMinor, lineMinor, taxMinor, madeToSize };
 }
 

@@ -1,0 +1,93 @@
+import { randomUUID } from "node:crypto";
+import { Logger, runOnce } from "graphile-worker";
+import { tasksOf } from "#server/jobs/tasks";
+import type { Order } from "#server/models/Order";
+import { Payment } from "#server/models/Payment";
+import type { User } from "#server/models/User";
+import type { Address, PlaceOrder } from "#shared/schemas/order";
+import { buildUser, testPassword } from "#tests/support/factories";
+import type { TestSite } from "#tests/support/testSite";
+import { type Visitor, visitor } from "#tests/support/visitor";
+
+export const homeAddress: Address = {
+  name: "Ada Example",
+  line1: "1 Workbench Row",
+  line2: "",
+  postcode: "00010",
+  town: "Testby",
+  region: "",
+  country: "DE",
+};
+
+export type Buyer = { user: User; me: Visitor };
+
+/** Somebody with an account, signed in. */
+export async function signedInBuyer(site: TestSite, given: Parameters<typeof buildUser>[0] = {}): Promise<Buyer> {
+  const user = await buildUser(given);
+  const me = await visitor(site);
+  await me.signIn(user.email, testPassword);
+  return { user, me };
+}
+
+export async function fill(me: Visitor, parts: readonly { id: string }[], quantity = 1): Promise<void> {
+  for (const { id } of parts) await me.put(`/basket/lines/${id}`, { quantity }).expect(200);
+}
+
+/** What a checkout page would send now, for what it was shown. */
+export async function checkoutInput(me: Visitor, given: Partial<PlaceOrder> = {}): Promise<PlaceOrder> {
+  const country = given.shippingAddress?.country ?? homeAddress.country;
+  const basket = await me.get(`/basket?shipTo=${country}`).expect(200);
+  return {
+    shippingAddress: homeAddress,
+    billingAddress: null,
+    expectedTotalMinor: basket.body.totalMinor,
+    currency: "EUR",
+    checkoutKey: randomUUID(),
+    ...given,
+  };
+}
+
+export async function checkOut(me: Visitor, given: Partial<PlaceOrder> = {}) {
+  return me.post("/orders", await checkoutInput(me, given));
+}
+
+/** A buyer with an order of these parts that waits for payment. */
+export async function waitingOrder(site: TestSite, parts: readonly { id: string }[], quantity = 1) {
+  const buyer = await signedInBuyer(site);
+  await fill(buyer.me, parts, quantity);
+  const res = await checkOut(buyer.me);
+  if (res.status !== 201) throw new Error(`checkout answered ${res.status}: ${res.text}`);
+  const orderId: string = res.body.orderId;
+  return { ...buyer, orderId, sessionId: await sessionOf(orderId) };
+}
+
+export async function sessionOf(orderId: string): Promise<string> {
+  const payment = await Payment.findOne({ where: { orderId }, rejectOnEmpty: true });
+  return payment.sessionId ?? "";
+}
+
+/** The next payment page is made, but the answer is lost, and the client's own two further tries fail. */
+export function loseTheAnswer({ stripe }: TestSite): void {
+  stripe.control.trouble({ kind: "cut-after-commit", on: "POST /v1/checkout/sessions" });
+  stripe.control.trouble({ kind: "fail", times: 3, on: "POST /v1/checkout/sessions" });
+}
+
+/** Works through every job that is due, and those that they make, and comes back. */
+export async function runJobs({ services }: TestSite): Promise<void> {
+  await runOnce({
+    pgPool: services.pool,
+    taskList: tasksOf(services),
+    noHandleSignals: true,
+    logger: new Logger(() => () => undefined),
+  });
+}
+
+/** The buyer pays on the provider's page, its events arrive and are applied. */
+export async function payAndApply(site: TestSite, sessionId: string): Promise<void> {
+  await site.stripe.control.pay(sessionId);
+  await site.stripe.control.settled();
+  await runJobs(site);
+}
+
+export const at = (order: Pick<Order, "createdAt">, minutes: number) =>
+  new Date(order.createdAt.getTime() + minutes * 60_000);

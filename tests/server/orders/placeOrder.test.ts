@@ -1,0 +1,284 @@
+import { randomUUID } from "node:crypto";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { inTransaction } from "#server/db/inTransaction";
+import { AuditEntry } from "#server/models/AuditEntry";
+import { Order } from "#server/models/Order";
+import { OrderLine } from "#server/models/OrderLine";
+import { Parcel } from "#server/models/Parcel";
+import type { Part } from "#server/models/Part";
+import { Payment } from "#server/models/Payment";
+import { SavedAddress } from "#server/models/SavedAddress";
+import { TaxRegistration } from "#server/models/TaxRegistration";
+import { buildPart, buildWorkshop } from "#tests/support/factories";
+import { startTestSite, type TestSite } from "#tests/support/testSite";
+import { visitor } from "#tests/support/visitor";
+import { checkOut, checkoutInput, fill, homeAddress, signedInBuyer, waitingOrder } from "./checkout";
+
+let site: TestSite;
+beforeAll(async () => {
+  site = await startTestSite();
+});
+afterAll(() => site.close());
+
+const reserved = async (part: Part) => (await part.reload()).stockReserved;
+
+describe("placing an order", () => {
+  it("holds the stock, writes what was bought, and gives one page for every workshop", async () => {
+    const taxed = await buildWorkshop({ tax: { DE: 1900 } });
+    const [a, b] = [await buildPart({ workshopId: taxed.id, madeToSize: true }), await buildPart({ priceMinor: 999 })];
+    const { user, me } = await signedInBuyer(site);
+    await me.put(`/basket/lines/${a.id}`, { quantity: 2, forNeed: "idler" }).expect(200);
+    await fill(me, [b]);
+    const res = await checkOut(me);
+    expect(res.status).toBe(201);
+
+    const order = await Order.findByPk(res.body.orderId, { rejectOnEmpty: true });
+    expect(order).toMatchObject({
+      buyerId: user.id,
+      state: "awaiting-payment",
+      partsMinor: 4999,
+      shippingMinor: 1300,
+      taxMinor: 750,
+      totalMinor: 6299,
+      billingAddress: homeAddress,
+    });
+    expect(res.body.number).toBe(order.number);
+    expect(order.holdUntil?.getTime()).toBeGreaterThan(Date.now() + 34 * 60_000);
+    expect(await reserved(a)).toBe(2);
+    expect(a.stockOnHand).toBe(10);
+
+    const parcels = await Parcel.findAll({ where: { orderId: order.id } });
+    expect(parcels.map(({ state }) => state)).toEqual(["to-accept", "to-accept"]);
+    const parcel = parcels.find(({ workshopId }) => workshopId === taxed.id)!;
+    expect(parcel).toMatchObject({
+      commissionMinor: 320,
+      taxRateBasisPoints: 1900,
+      trader: { legalName: taxed.legalName },
+    });
+    const line = await OrderLine.findOne({ where: { parcelId: parcel.id }, rejectOnEmpty: true });
+    expect(line).toMatchObject({ quantity: 2, forNeed: "idler", madeToSize: true, holdsStock: true, lineMinor: 4000 });
+    expect(line.listing.dimensions.outsideDiameter?.nominalMm).toBe(44);
+
+    const payment = await Payment.findOne({ where: { orderId: order.id }, rejectOnEmpty: true });
+    expect(payment).toMatchObject({ state: "open", url: res.body.paymentUrl, amountMinor: 6299 });
+    const session = await site.services.payments.checkout.sessions.retrieve(payment.sessionId!);
+    expect(session).toMatchObject({
+      amount_total: 6299,
+      currency: "eur",
+      client_reference_id: order.id,
+      metadata: { orderId: order.id },
+      customer_email: user.email,
+      success_url: `${site.url}/orders/${order.id}?paid=1`,
+      cancel_url: `${site.url}/orders/${order.id}?left=1`,
+    });
+    expect(session.expires_at * 1000).toBeLessThan(order.holdUntil!.getTime());
+    const items = await site.services.payments.checkout.sessions.listLineItems(session.id);
+    expect(items.data.map(({ amount_total }) => amount_total).sort((x, y) => x - y)).toEqual([600, 700, 999, 4000]);
+
+    expect((await me.get("/basket")).body.count).toBe(3);
+    expect(await SavedAddress.count({ where: { userId: user.id } })).toBe(1);
+    expect(await AuditEntry.count({ where: { subjectId: order.id, action: "order-placed", actorId: user.id } })).toBe(
+      1,
+    );
+  });
+
+  it("gives the same order and page for the same key, also when it is sent twice at once", async () => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const input = await checkoutInput(me);
+    const both = await Promise.all([me.post("/orders", input), me.post("/orders", input)]);
+    const again = await me.post("/orders", input);
+    expect([...both, again].map(({ status }) => status)).toEqual([201, 201, 201]);
+    expect(new Set([...both, again].map(({ text }) => text)).size).toBe(1);
+    expect(await Order.count({ where: { buyerId: user.id } })).toBe(1);
+    expect(await reserved(part)).toBe(1);
+  });
+
+  it("lets two buyers use the same key without meeting", async () => {
+    const part = await buildPart();
+    const checkoutKey = randomUUID();
+    const orders = [];
+    for (let i = 0; i < 2; i++) {
+      const { me } = await signedInBuyer(site);
+      await fill(me, [part]);
+      orders.push((await checkOut(me, { checkoutKey })).body.orderId);
+    }
+    expect(new Set(orders).size).toBe(2);
+  });
+
+  it("keeps an address once, however often it is used", async () => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    await checkOut(me);
+    await checkOut(me, { shippingAddress: { ...homeAddress, name: "Somebody else" } });
+    await checkOut(me);
+    expect(await SavedAddress.count({ where: { userId: user.id } })).toBe(2);
+  });
+
+  it("keeps the listing as it was bought when it changes later", async () => {
+    const part = await buildPart({ title: "As bought" });
+    const { me, orderId } = await waitingOrder(site, [part]);
+    await part.update({ title: "Changed", priceMinor: 1 });
+    const res = await me.get(`/orders/${orderId}`).expect(200);
+    expect(res.body.parcels[0].lines[0]).toMatchObject({ title: "As bought", unitMinor: 2000 });
+  });
+
+  it("takes no stock of what is made when ordered", async () => {
+    const part = await buildPart({ offerType: "made-to-order", leadDays: 10 });
+    const { orderId } = await waitingOrder(site, [part], 20);
+    const parcel = await Parcel.findOne({ where: { orderId }, rejectOnEmpty: true });
+    expect(parcel.leavesInDays).toBe(13);
+    expect(await reserved(part)).toBe(0);
+  });
+});
+
+describe("placing an order is refused", () => {
+  async function nothingHappened(userId: string, ...parts: Part[]) {
+    expect(await Order.count({ where: { buyerId: userId } })).toBe(0);
+    for (const part of parts) expect(await reserved(part)).toBe(0);
+  }
+
+  it("to a visitor", async () => {
+    const someone = await visitor(site);
+    const res = await someone.post("/orders", { ...(await checkoutInput(someone)), expectedTotalMinor: 1 });
+    expect(res.status).toBe(401);
+  });
+
+  it("before the address is confirmed", async () => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site, { emailVerifiedAt: null });
+    await fill(me, [part]);
+    const res = await checkOut(me);
+    expect([res.status, res.body.type]).toEqual([403, "/problems/verify-first"]);
+    await nothingHappened(user.id, part);
+  });
+
+  it("with an empty basket", async () => {
+    const { me } = await signedInBuyer(site);
+    const res = await checkOut(me);
+    expect([res.status, res.body.type]).toEqual([409, "/problems/empty-basket"]);
+  });
+
+  it.each([
+    ["the price", (part: Part) => part.update({ priceMinor: 2100 })],
+    ["the tax", async () => undefined],
+  ])("when %s changed the total meanwhile, saying what it is now", async (what, change) => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const input = await checkoutInput(me);
+    await change(part);
+    const wrong = what === "the tax" ? { ...input, expectedTotalMinor: input.expectedTotalMinor - 1 } : input;
+    const res = await me.post("/orders", wrong);
+    expect([res.status, res.body.type]).toEqual([409, "/problems/total-changed"]);
+    expect(res.body.detail).toContain(what === "the price" ? "€27.00" : "€26.00");
+    expect(res.body.errors[0].pointer).toBe("#/expectedTotalMinor");
+    await nothingHappened(user.id, part);
+  });
+
+  it("in another currency than the market's", async () => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const res = await checkOut(me, { currency: "USD" });
+    expect(res.body.type).toBe("/problems/total-changed");
+    await nothingHappened(user.id, part);
+  });
+
+  it("when one part of several ran out, naming its line and holding none of the others", async () => {
+    const [fine, short] = [await buildPart(), await buildPart({ stockOnHand: 3 })];
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [fine, short], 2);
+    const input = await checkoutInput(me);
+    await short.update({ stockOnHand: 1 });
+    const res = await me.post("/orders", input);
+    expect([res.status, res.body.type]).toEqual([409, "/problems/out-of-stock"]);
+    expect(res.body.errors).toEqual([
+      { pointer: `#/lines/${short.id}`, detail: expect.stringContaining("Only 1 left") },
+    ]);
+    await nothingHappened(user.id, fine, short);
+  });
+
+  it("when a part is no longer sold", async () => {
+    const part = await buildPart();
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const input = await checkoutInput(me);
+    await part.update({ state: "hidden" });
+    expect((await me.post("/orders", input)).body.type).toBe("/problems/out-of-stock");
+    await nothingHappened(user.id, part);
+  });
+
+  it("when a part is sold in another currency", async () => {
+    const part = await buildPart({ currency: "USD" });
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    expect((await checkOut(me)).body.type).toBe("/problems/wrong-state");
+    await nothingHappened(user.id, part);
+  });
+
+  it("to a country that a workshop does not ship to", async () => {
+    const part = await buildPart({ workshopId: (await buildWorkshop({ countries: ["DE"] })).id });
+    const { user, me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const res = await checkOut(me, { shippingAddress: { ...homeAddress, country: "NO" } });
+    expect([res.status, res.body.type]).toEqual([409, "/problems/not-shipped-there"]);
+    expect(res.body.errors[0]).toEqual({
+      pointer: "#/shippingAddress/country",
+      detail: expect.stringContaining("Norway"),
+    });
+    await nothingHappened(user.id, part);
+  });
+
+  it("with fields that are not right, naming them", async () => {
+    const { me } = await signedInBuyer(site);
+    const input = await checkoutInput(me);
+    const res = await me.post("/orders", {
+      ...input,
+      shippingAddress: { ...homeAddress, name: "Ada\r\nBcc: x@example.org", country: "Germany" },
+      checkoutKey: "1",
+    });
+    expect(res.status).toBe(422);
+    expect(res.body.errors.map(({ pointer }: { pointer: string }) => pointer).sort()).toEqual([
+      "#/checkoutKey",
+      "#/shippingAddress/country",
+      "#/shippingAddress/name",
+    ]);
+  });
+
+  it("while five orders of the same buyer wait already, until one is cancelled", async () => {
+    const part = await buildPart({ stockOnHand: 50 });
+    const { me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const orders = [];
+    for (let i = 0; i < 5; i++) orders.push((await checkOut(me)).body.orderId);
+    const res = await checkOut(me);
+    expect([res.status, res.body.type]).toEqual([409, "/problems/wrong-state"]);
+    expect(await reserved(part)).toBe(5);
+    await me.post(`/orders/${orders[0]}/cancel`).expect(200);
+    expect((await checkOut(me)).status).toBe(201);
+  });
+});
+
+describe("the database", () => {
+  it("refuses to hold more than there is, whatever the program does", async () => {
+    const part = await buildPart({ stockOnHand: 1 });
+    await expect(part.update({ stockReserved: 2 })).rejects.toThrow(/parts_reserved_within_stock/);
+  });
+
+  it("refuses an order whose total is not the sum", async () => {
+    const { orderId } = await waitingOrder(site, [await buildPart()]);
+    await expect(
+      inTransaction((transaction) => Order.update({ totalMinor: 1 }, { where: { id: orderId }, transaction })),
+    ).rejects.toThrow(/orders_tax_contained|orders_total_is_sum/);
+  });
+
+  it("keeps a tax registration of a workshop once a country", async () => {
+    const workshop = await buildWorkshop({ tax: { DE: 1900 } });
+    await expect(
+      TaxRegistration.create({ workshopId: workshop.id, country: "DE", number: "X", rateBasisPoints: 700 }),
+    ).rejects.toThrow();
+  });
+});
