@@ -1,5 +1,6 @@
 import { Suspense, useEffect, useRef } from "react";
 import { Outlet, useLocation } from "react-router-dom";
+import { StripBar } from "../features/search/StripBar";
 import { ErrorBoundary } from "./ErrorBoundary";
 import { Footer } from "./Footer";
 import { Header } from "./Header";
@@ -19,7 +20,8 @@ function useFocusOnNewPage() {
   return main;
 }
 
-export function Layout() {
+/** What every page has around it; public pages have the measure strip at their head. */
+export function Layout({ hasStrip = false }: { hasStrip?: boolean }) {
   const main = useFocusOnNewPage();
   const { pathname } = useLocation();
   useScrollPosition();
@@ -29,6 +31,7 @@ export function Layout() {
         Skip to the content
       </a>
       <Header />
+      {hasStrip && <StripBar />}
       <main id="main" ref={main} tabIndex={-1} className="flex-1">
         <ErrorBoundary resetKey={pathname}>
           <Suspense fallback={<div className="min-h-dvh" />}>

@@ -17,6 +17,13 @@ export function useBasketCount(): number | undefined {
   return useQuery(basketQuery(useShipTo())).data?.count;
 }
 
+/** How many of this part lie in the basket. */
+export function usePartInBasket(partId: string): number {
+  const basket = useQuery(basketQuery(useShipTo())).data;
+  const lines = basket?.parcels.flatMap((parcel) => parcel.lines) ?? [];
+  return lines.find(({ part }) => part.id === partId)?.quantity ?? 0;
+}
+
 type Put = PutBasketLine & { partId: string };
 
 /** Sets how many of a part lie in the basket, and has every view of the basket follow. */

@@ -26,8 +26,14 @@ export function VerdictShape({ verdict, radius = 5 }: { verdict: Verdict; radius
 /** Mark, word and chance: "Sure 96 %". */
 export function VerdictMark({ verdict, chance }: { verdict: Verdict; chance: number }) {
   return (
-    <span className={`inline-flex items-center gap-2 font-bold whitespace-nowrap ${verdictColour[verdict]}`}>
-      <svg width="14" height="14" viewBox="-7 -7 14 14" aria-hidden="true">
+    <span className={`font-bold whitespace-nowrap ${verdictColour[verdict]}`}>
+      <svg
+        width="14"
+        height="14"
+        viewBox="-7 -7 14 14"
+        className="mr-1.5 inline-block align-[-0.1em]"
+        aria-hidden="true"
+      >
         <VerdictShape verdict={verdict} />
       </svg>
       {verdictWords[verdict]} {chanceWords(chance)}

@@ -1,0 +1,226 @@
+import { useQuery } from "@tanstack/react-query";
+import { type FormEvent, lazy, type ReactNode, Suspense, useEffect, useRef } from "react";
+import { flushSync } from "react-dom";
+import { useNavigate } from "react-router-dom";
+import { type Condition, conditionFacts, conditionsFor } from "#shared/domain/conditions";
+import { countryName } from "#shared/domain/countries";
+import { type Instrument, instrumentFacts, instruments } from "#shared/domain/instruments";
+import { type DimensionName, dimensionWords, kindFacts, type PartKind, partKinds } from "#shared/domain/partKinds";
+import { countriesQuery, familiesQuery } from "../../lib/catalogue";
+import { offerStrip } from "../../lib/focusStrip";
+import { type NeedValues, needParams, primaryOf } from "../../lib/needParams";
+import { keepShipTo } from "../../lib/preferences";
+import { Button } from "../../ui/Button";
+import { LengthSlot, slotId } from "./LengthSlot";
+import { StripSelect } from "./StripSelect";
+import { useSlashKey } from "./useSlashKey";
+import { lengthProblems, useStrip } from "./useStrip";
+
+// What it works out is not needed until something is written; fetched apart, it leaves the first page lighter.
+const AsNewLine = lazy(async () => ({ default: (await import("./AsNewLine")).AsNewLine }));
+
+export type StripLook = "large" | "plain" | "compact";
+
+type Props = {
+  initial: NeedValues;
+  look: StripLook;
+  /** Where the need is taken: the results, or the part that is being looked at. */
+  action: string;
+  submitWords: string;
+  /** Stands after the button: "back to 34 parts". */
+  aside?: ReactNode;
+};
+
+const examples: Partial<Record<DimensionName, string>> = { insideCircumference: "532 mm", outsideDiameter: "44.1 mm" };
+const exampleOf = (name: DimensionName) => examples[name] ?? "4.0 mm";
+const article = (words: string) => (/^[aeiou]/.test(words) ? "an" : "a");
+
+/** The need as one sentence. Enter searches; all of it goes into the address. A plain GET form underneath. */
+export function MeasureStrip({ initial, look, action, submitWords, aside }: Props) {
+  const strip = useStrip(initial);
+  const { values, shown, closed } = strip;
+  const { kind, condition, instrument, family, shipTo } = values;
+  const families = useQuery(familiesQuery).data?.items ?? [];
+  const countries = useQuery(countriesQuery).data?.items ?? [];
+  const navigate = useNavigate();
+  const form = useRef<HTMLFormElement>(null);
+  const problems = lengthProblems(values);
+  const isMeasured = conditionFacts[condition].hasReadings;
+  const isWritten = !isMeasured || shown.some((name) => values.lengths[name]);
+  const large = look === "large";
+
+  const focusSize = (name: DimensionName) => {
+    flushSync(() => strip.openSize(name));
+    const field = document.getElementById(slotId(name));
+    field?.focus();
+    field?.scrollIntoView({ block: "center" });
+  };
+  useSlashKey(() => focusSize(primaryOf(kind)));
+  const latestFocus = useRef(focusSize);
+  latestFocus.current = focusSize;
+  useEffect(() => offerStrip((name) => latestFocus.current(name)), []);
+
+  const submit = (event: FormEvent) => {
+    event.preventDefault();
+    const wrong = isMeasured ? shown.find((name) => problems[name]) : undefined;
+    if (wrong) {
+      const field = document.getElementById(slotId(wrong));
+      field?.focus();
+      field?.dispatchEvent(new Event("invalid"));
+      return;
+    }
+    keepShipTo(shipTo);
+    void navigate(`${action}?${needParams(values)}`);
+  };
+
+  const familyName = families.find(({ slug }) => slug === family)?.name ?? family;
+  return (
+    <search className="block border-b border-rule bg-sheet print:hidden">
+      <form ref={form} action={action} method="get" onSubmit={submit} className={`page strip strip-${look}`} noValidate>
+        <div className="strip-sentence">
+          {look !== "compact" && `I need ${article(kindFacts[kind].name)} `}
+          <StripSelect
+            label="Kind of part"
+            name="kind"
+            value={kind}
+            shownText={kindFacts[kind].name}
+            onChange={(event) => strip.setKind(event.target.value as PartKind)}
+          >
+            {partKinds.map((name) => (
+              <option key={name} value={name}>
+                {kindFacts[name].name}
+              </option>
+            ))}
+          </StripSelect>
+          {isMeasured && (
+            <>
+              {look !== "compact" && " measuring "}
+              {shown.map((name) => (
+                <span key={name}>
+                  {name !== shown[0] || look === "compact" ? ", " : ""}
+                  <LengthSlot
+                    name={name}
+                    text={values.lengths[name] ?? ""}
+                    unit={values.unit}
+                    problem={problems[name]}
+                    example={exampleOf(name)}
+                    onText={(text) => strip.setLength(name, text)}
+                    onRemove={name === primaryOf(kind) ? undefined : () => strip.closeSize(name)}
+                  />
+                </span>
+              ))}
+              {closed.length > 0 && (
+                <>
+                  {", "}
+                  <StripSelect
+                    label="Add a size"
+                    value=""
+                    shownText="+ size"
+                    className="slot-soft"
+                    onChange={(event) => focusSize(event.target.value as DimensionName)}
+                  >
+                    <option value="">+ size</option>
+                    {closed.map((name) => (
+                      <option key={name} value={name}>
+                        {dimensionWords[name]}
+                      </option>
+                    ))}
+                  </StripSelect>
+                </>
+              )}
+              {look === "compact" ? ", " : " taken with a "}
+              <StripSelect
+                label="Measured with"
+                name="instrument"
+                value={instrument}
+                shownText={instrumentFacts[instrument].name}
+                onChange={(event) => strip.set({ instrument: event.target.value as Instrument })}
+              >
+                {instruments.map((name) => (
+                  <option key={name} value={name}>
+                    {instrumentFacts[name].name}
+                  </option>
+                ))}
+              </StripSelect>
+            </>
+          )}
+          {look === "compact" ? ", " : isMeasured ? ". It was " : ". It is "}
+          <StripSelect
+            label="Condition of the old part"
+            name="condition"
+            value={condition}
+            shownText={conditionFacts[condition].name}
+            onChange={(event) => strip.set({ condition: event.target.value as Condition })}
+          >
+            {conditionsFor(kind).map((name) => (
+              <option key={name} value={name}>
+                {conditionFacts[name].name}
+              </option>
+            ))}
+          </StripSelect>
+          {", from "}
+          <StripSelect
+            label="Mechanism family"
+            name="family"
+            value={family}
+            shownText={family ? familyName : "any mechanism"}
+            className={family ? "" : "slot-soft"}
+            onChange={(event) => strip.set({ family: event.target.value })}
+          >
+            <option value="">any mechanism</option>
+            {family && !families.some(({ slug }) => slug === family) && <option value={family}>{family}</option>}
+            {families.map(({ slug, name }) => (
+              <option key={slug} value={slug}>
+                {name}
+              </option>
+            ))}
+          </StripSelect>
+          {", to "}
+          <StripSelect
+            label="Country that it is sent to"
+            name="shipTo"
+            value={shipTo}
+            shownText={countryName(shipTo)}
+            onChange={(event) => strip.set({ shipTo: event.target.value })}
+          >
+            {!countries.some(({ code }) => code === shipTo) && <option value={shipTo}>{countryName(shipTo)}</option>}
+            {countries.map(({ code, name }) => (
+              <option key={code} value={code}>
+                {name}
+              </option>
+            ))}
+          </StripSelect>
+          {". "}
+          {values.unit === "in" && <input type="hidden" name="unit" value="in" />}
+          <Button type="submit" look="primary" className="strip-submit">
+            {submitWords}
+          </Button>
+          {aside}
+        </div>
+        <div className={`strip-notes ${look === "compact" ? "hidden" : ""}`}>
+          {isWritten ? (
+            <Suspense fallback={<p>&nbsp;</p>}>
+              <AsNewLine values={values} shown={shown} />
+            </Suspense>
+          ) : (
+            <p className="text-soft">
+              Write sizes as you read them: 44.1, 44,1 mm, 1.736 in, 1-47/64, 750 thou. Wear is reckoned in for you.
+            </p>
+          )}
+          <label className="flex items-baseline gap-x-2 whitespace-nowrap text-soft">
+            Or words
+            <input
+              type="search"
+              name="q"
+              value={values.q}
+              maxLength={120}
+              placeholder={large ? "a maker, a model, a kind of wheel" : ""}
+              className="slot-words"
+              onChange={(event) => strip.set({ q: event.target.value })}
+            />
+          </label>
+        </div>
+      </form>
+    </search>
+  );
+}
