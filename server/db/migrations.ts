@@ -6,6 +6,16 @@ import { parts } from "./migrations/0004-parts";
 import { orders } from "./migrations/0005-orders";
 import { ledger } from "./migrations/0006-ledger";
 import { mails } from "./migrations/0007-mails";
+import { searchVocabulary } from "./migrations/0008-search-vocabulary";
 
 /** Every migration, oldest first. */
-export const migrations: readonly Migration[] = [accounts, workshops, families, parts, orders, ledger, mails];
+export const migrations: readonly Migration[] = [
+  accounts,
+  workshops,
+  families,
+  parts,
+  orders,
+  ledger,
+  mails,
+  searchVocabulary,
+];
