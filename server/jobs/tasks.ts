@@ -18,6 +18,7 @@ const work: { [Name in keyof Jobs]?: Work<Name> } = {
   sendMail: (services, { mailId }, { lastTry }) => sendMail(services, mailId, { lastTry }),
   expireOrder: (services, { orderId }) => expireOrder(services, orderId),
   applyPaymentEvent: (services, { eventId }) => applyPaymentEvent(services, eventId),
+  indexParts: ({ search }, { partIds }) => search.index(partIds),
   refundOrder: (services, { orderId, reason }) => refundOrder(services, orderId, reason),
 };
 

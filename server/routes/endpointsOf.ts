@@ -3,9 +3,24 @@ import type { Services } from "../Services";
 import { addressRoutes } from "./addresses";
 import { authRoutes } from "./auth";
 import { basketRoutes } from "./basket";
+import { countryRoutes } from "./countries";
+import { familyRoutes } from "./families";
 import { orderRoutes } from "./orders";
+import { partRoutes } from "./parts";
+import { searchRoutes } from "./search";
+import { workshopRoutes } from "./workshops";
 
 /** Every call of the interface. One that is not listed here is neither served nor described. */
 export function endpointsOf(services: Services): Endpoint[] {
-  return [...authRoutes(services), ...basketRoutes(), ...orderRoutes(services), ...addressRoutes()];
+  return [
+    ...authRoutes(services),
+    ...searchRoutes(services),
+    ...partRoutes(),
+    ...familyRoutes(services),
+    ...workshopRoutes(),
+    ...countryRoutes(),
+    ...basketRoutes(),
+    ...orderRoutes(services),
+    ...addressRoutes(),
+  ];
 }
