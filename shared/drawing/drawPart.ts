@@ -63,7 +63,7 @@ export function drawPart(request: PartDrawingRequest): Scene {
   const tall = large ? Math.min(height, composition.height + pad * 2 + footRoom) : height;
   const left = (width - composition.width) / 2;
   const top = large ? pad : (height - composition.height) / 2;
-  const items = composition.items.map((item) => moveItem(item, left, top));
+  const items = composition.items().map((item) => moveItem(item, left, top));
   if (foot) items.push(...foot.draw(pxPerMm, tall - pad - foot.height).map((item) => moveItem(item, pad, 0)));
 
   const magnified = views.find((v) => v.magnification !== 1);

@@ -7,7 +7,7 @@ export const themeColours: Record<DrawingTheme, Record<ColourName, string>> = {
   light: {
     sheet: "#F8FAF9",
     ink: "#16202E",
-    soft: "#4F5D6B",
+    soft: "#44515E",
     measured: "#1846C9",
     rubber: "#23282D",
     "rubber-hatch": "#87929C",
@@ -18,12 +18,12 @@ export const themeColours: Record<DrawingTheme, Record<ColourName, string>> = {
   dark: {
     sheet: "#141E29",
     ink: "#E6EEF0",
-    soft: "#9FB0BA",
+    soft: "#A9B9C2",
     measured: "#8FB0FF",
     rubber: "#05090D",
     "rubber-hatch": "#76858F",
     metal: "#D9AE55",
-    "metal-fill": "#54441F",
+    "metal-fill": "#47391B",
     felt: "#46503F",
   },
 };

@@ -2,12 +2,16 @@ import type { Box, Outline, Point, SceneItem } from "../Scene";
 
 /** Smallest box around boxes; undefined for none. */
 export function around(boxes: readonly Box[]): Box | undefined {
-  if (boxes.length === 0) return undefined;
-  const x = Math.min(...boxes.map((b) => b.x));
-  const y = Math.min(...boxes.map((b) => b.y));
-  const right = Math.max(...boxes.map((b) => b.x + b.width));
-  const bottom = Math.max(...boxes.map((b) => b.y + b.height));
-  return { x, y, width: right - x, height: bottom - y };
+  const [first] = boxes;
+  if (!first) return undefined;
+  let [left, top, right, bottom] = [first.x, first.y, first.x + first.width, first.y + first.height];
+  for (const { x, y, width, height } of boxes) {
+    left = Math.min(left, x);
+    top = Math.min(top, y);
+    right = Math.max(right, x + width);
+    bottom = Math.max(bottom, y + height);
+  }
+  return { x: left, y: top, width: right - left, height: bottom - top };
 }
 
 export function overlap(a: Box, b: Box): boolean {

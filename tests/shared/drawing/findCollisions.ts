@@ -1,4 +1,4 @@
-import { overlap } from "#shared/drawing/layout/boxOfItem";
+import { boxOfItem, overlap } from "#shared/drawing/layout/boxOfItem";
 import type { Box, Outline, Point, Scene, SceneItem, TextItem } from "#shared/drawing/Scene";
 
 /** Everything that a label of the scene touches and should not, in words; an empty list for a clean drawing. */
@@ -14,7 +14,8 @@ export function findCollisions(scene: Scene): string[] {
       if (overlap(ink, inkOf(other))) found.push(`"${text.content}" meets "${other.content}"`);
     }
     for (const item of scene.items) {
-      if (item.type !== "text" && touches(item, ink)) found.push(`"${text.content}" meets ${nameOf(item)}`);
+      if (item.type !== "text" && overlap(boxOfItem(item), ink) && touches(item, ink))
+        found.push(`"${text.content}" meets ${nameOf(item)}`);
     }
   }
   return found;
