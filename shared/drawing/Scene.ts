@@ -31,8 +31,7 @@ export type Outline =
   | { shape: "circle"; centre: Point; radius: number }
   | { shape: "stadium"; centre: Point; radius: number; straight: number };
 
-export const materialLooks = ["rubber", "metal", "felt", "cork"] as const;
-export type MaterialLook = (typeof materialLooks)[number];
+export type MaterialLook = "rubber" | "metal" | "felt" | "cork";
 
 /**
  * `outline` stated edge, `thin` edge that no dimension sets (a usual proportion), `presumed` edge whose size

@@ -3,7 +3,7 @@ import type { DimensionSign, TextItem } from "./Scene";
 import { signWidthEm } from "./textWidth";
 
 /** Height of a capital letter and of a digit in the product's typeface, em (its OS/2 table says 660 of 1000). */
-export const capHeight = 0.66;
+const capHeight = 0.66;
 
 /** Where a text's baseline begins, and how it is turned. */
 export function baselineOf({ box, size, turned }: TextItem): { x: number; y: number } {

@@ -2,7 +2,7 @@ import type { DimensionName } from "#shared/domain/partKinds";
 import type { Point, SceneItem } from "../Scene";
 
 /** An extension line stops this far from the edge and runs this far past the dimension line, px. */
-export const extensionGap = 2;
+const extensionGap = 2;
 export const extensionPast = 4;
 
 /** Whether arrowheads fit between two edges `span` px apart; else they stand outside and point inwards. */

@@ -10,7 +10,7 @@ export type BeltKind = Extract<PartKind, "flat-belt" | "square-belt" | "round-be
 const straightPerRadius = 1.6;
 
 /** Radius of a drawn loop's ends so that its inside measures exactly this circumference (mm in, mm out). */
-export function loopRadius(insideCircumference: number): number {
+function loopRadius(insideCircumference: number): number {
   return insideCircumference / (2 * Math.PI + 2 * straightPerRadius);
 }
 

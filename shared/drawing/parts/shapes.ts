@@ -11,7 +11,7 @@ export function circle(radius: number, centre: Point = origin): Outline {
   return { shape: "circle", centre, radius };
 }
 
-export function rectangle(x0: number, y0: number, x1: number, y1: number): Outline {
+function rectangle(x0: number, y0: number, x1: number, y1: number): Outline {
   const [left, right, top, bottom] = [Math.min(x0, x1), Math.max(x0, x1), Math.min(y0, y1), Math.max(y0, y1)];
   return {
     shape: "polygon",

@@ -102,7 +102,7 @@ export function paintSheen(canvas: PhotoCanvas, camera: Camera, radius: number, 
   canvas.add(`<g clip-path="url(#${clip})">${ray(-2.2, 0.34, "#ffffff", 0.17)}${ray(-0.7, 0.3, "#000000", 0.08)}</g>`);
 }
 
-export function ellipse(at: Point, rx: number, fill: string, more = ""): string {
+function ellipse(at: Point, rx: number, fill: string, more = ""): string {
   return `<ellipse cx="${f(at.x)}" cy="${f(at.y)}" rx="${f(rx)}" ry="${f(rx * foreshortening)}" fill="${fill}" ${more}/>`;
 }
 
