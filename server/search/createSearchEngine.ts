@@ -1,8 +1,11 @@
+import type { Logger } from "pino";
 import type { SearchEngine } from "../adapters/SearchEngine";
 import type { Config } from "../config";
+import { MeilisearchEngine } from "./MeilisearchEngine";
 import { PostgresSearchEngine } from "./PostgresSearchEngine";
 
 /** The engine that the settings ask for: PostgreSQL, or Meilisearch where its address is set. */
-export function createSearchEngine(_config: Pick<Config, "meili">): SearchEngine {
-  return new PostgresSearchEngine();
+export function createSearchEngine({ meili }: Pick<Config, "meili">, logger?: Logger): SearchEngine {
+  const database = new PostgresSearchEngine();
+  return meili ? new MeilisearchEngine(meili, database, logger) : database;
 }

@@ -2,11 +2,11 @@ import { forgivenSlips, mayStandFor } from "./editDistance";
 import { plainWords } from "./plainWords";
 import { select } from "./select";
 
-const mostWords = 12;
+const mostWords = 10;
 /** Words that say nothing about a part. */
 const idle = new Set("a an and as at by for from i in is it my of on or that the this to with".split(" "));
 
-/** The words of a query that are looked for, at most twelve. */
+/** The words of a query that are looked for, at most ten. */
 export const soughtWords = (text: string): string[] =>
   [...new Set(plainWords(text))].filter((word) => !idle.has(word)).slice(0, mostWords);
 
