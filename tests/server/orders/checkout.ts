@@ -1,5 +1,6 @@
 import { randomUUID } from "node:crypto";
 import { Logger, runOnce } from "graphile-worker";
+import { expect } from "vitest";
 import { tasksOf } from "#server/jobs/tasks";
 import type { Order } from "#server/models/Order";
 import { Payment } from "#server/models/Payment";
@@ -66,10 +67,20 @@ export async function sessionOf(orderId: string): Promise<string> {
   return payment.sessionId ?? "";
 }
 
-/** The next payment page is made, but the answer is lost, and the client's own two further tries fail. */
-export function loseTheAnswer({ stripe }: TestSite): void {
-  stripe.control.trouble({ kind: "cut-after-commit", on: "POST /v1/checkout/sessions" });
-  stripe.control.trouble({ kind: "fail", times: 3, on: "POST /v1/checkout/sessions" });
+/**
+ * Sends a checkout whose payment page is made at the provider while its answer is lost: the connection is cut after the
+ * work, and the client's own two further tries fail.
+ */
+export async function loseTheAnswer<Answer>({ stripe: { control } }: TestSite, send: () => PromiseLike<Answer>) {
+  const on = "POST /v1/checkout/sessions";
+  control.trouble({ kind: "hold", on });
+  control.trouble({ kind: "cut-after-commit", on });
+  const answer = Promise.resolve(send());
+  // Held, it is past the check for failures, which then meet the tries that follow alone.
+  await expect.poll(() => control.heldRequests()).toBe(1);
+  control.trouble({ kind: "fail", times: 2, on });
+  control.releaseRequests();
+  return answer;
 }
 
 /** Works through every job that is due, and those that they make, and comes back. */

@@ -9,7 +9,17 @@ import { Workshop } from "#server/models/Workshop";
 import { buildPart, buildUser, testPassword } from "#tests/support/factories";
 import { startTestSite, type TestSite } from "#tests/support/testSite";
 import { visitor } from "#tests/support/visitor";
-import { at, checkOut, fill, homeAddress, loseTheAnswer, payAndApply, runJobs, signedInBuyer, waitingOrder } from "./checkout";
+import {
+  at,
+  checkOut,
+  fill,
+  homeAddress,
+  loseTheAnswer,
+  payAndApply,
+  runJobs,
+  signedInBuyer,
+  waitingOrder,
+} from "./checkout";
 
 let site: TestSite;
 beforeAll(async () => {
@@ -173,8 +183,7 @@ describe("cancelling", () => {
     const part = await buildPart();
     const { me, user } = await signedInBuyer(site);
     await fill(me, [part]);
-    loseTheAnswer(site);
-    expect((await checkOut(me)).status).toBe(503);
+    expect((await loseTheAnswer(site, () => checkOut(me))).status).toBe(503);
     const order = await Order.findOne({ where: { buyerId: user.id }, rejectOnEmpty: true });
     await me.post(`/orders/${order.id}/cancel`).expect(200);
     const payment = await Payment.findOne({ where: { orderId: order.id }, rejectOnEmpty: true });
