@@ -13,7 +13,9 @@ import { createSearchEngine } from "./search/createSearchEngine";
 export function createServices(config: Config): Services {
   const logger = createLogger(config.logLevel);
   const pool = new pg.Pool({ connectionString: config.databaseUrl, max: 8 });
-  pool.on("error", (error) => logger.warn({ err: error }, "an idle database connection failed"));
+  const lost = (error: Error) => logger.warn({ err: error }, "an idle database connection failed");
+  pool.on("error", lost);
+  pool.on("connect", (client) => client.on("error", lost));
   return {
     config,
     logger,
@@ -22,7 +24,7 @@ export function createServices(config: Config): Services {
     // Tests sign in and search far more often than anybody would from one address.
     limits: new RateLimits(pool, config.mode === "test" ? 1000 : 1),
     payments: createPaymentProvider(config.stripe),
-    search: createSearchEngine(config),
+    search: createSearchEngine(config, logger),
     mailer: createMailer(config.mail),
     photos: new PhotoStore(config.dataDir),
   };
