@@ -6,6 +6,40 @@ import { NotFoundPage } from "./NotFoundPage";
 // Each page is fetched when it is first opened.
 const HomePage = lazy(async () => ({ default: (await import("../features/search/HomePage")).HomePage }));
 const ResultsPage = lazy(async () => ({ default: (await import("../features/search/ResultsPage")).ResultsPage }));
+const PartPage = lazy(async () => ({ default: (await import("../features/parts/PartPage")).PartPage }));
+const FamilyListPage = lazy(async () => ({
+  default: (await import("../features/families/FamilyListPage")).FamilyListPage,
+}));
+const FamilyPage = lazy(async () => ({ default: (await import("../features/families/FamilyPage")).FamilyPage }));
+const WorkshopListPage = lazy(async () => ({
+  default: (await import("../features/workshops/WorkshopListPage")).WorkshopListPage,
+}));
+const WorkshopPage = lazy(async () => ({
+  default: (await import("../features/workshops/WorkshopPage")).WorkshopPage,
+}));
+const SignInPage = lazy(async () => ({ default: (await import("../features/account/SignInPage")).SignInPage }));
+const SignUpPage = lazy(async () => ({ default: (await import("../features/account/SignUpPage")).SignUpPage }));
+const CheckMailPage = lazy(async () => ({
+  default: (await import("../features/account/CheckMailPage")).CheckMailPage,
+}));
+const VerifyEmailPage = lazy(async () => ({
+  default: (await import("../features/account/VerifyEmailPage")).VerifyEmailPage,
+}));
+const ForgotPasswordPage = lazy(async () => ({
+  default: (await import("../features/account/ForgotPasswordPage")).ForgotPasswordPage,
+}));
+const ResetPasswordPage = lazy(async () => ({
+  default: (await import("../features/account/ResetPasswordPage")).ResetPasswordPage,
+}));
+const AccountPage = lazy(async () => ({ default: (await import("../features/account/AccountPage")).AccountPage }));
+const SignedIn = lazy(async () => ({ default: (await import("./SignedIn")).SignedIn }));
+const SendVerification = lazy(async () => ({
+  default: (await import("../features/account/SendVerification")).SendVerification,
+}));
+const BasketPage = lazy(async () => ({ default: (await import("../features/basket/BasketPage")).BasketPage }));
+const CheckoutPage = lazy(async () => ({ default: (await import("../features/basket/CheckoutPage")).CheckoutPage }));
+const OrdersPage = lazy(async () => ({ default: (await import("../features/orders/OrdersPage")).OrdersPage }));
+const OrderPage = lazy(async () => ({ default: (await import("../features/orders/OrderPage")).OrderPage }));
 
 /**
  * Every address and its page. Declarative on purpose: the router with loaders weighs 18 kB more (gzip), and queries
@@ -17,8 +51,26 @@ export function AppRoutes() {
       <Route element={<Layout hasStrip />}>
         <Route index element={<HomePage />} />
         <Route path="find" element={<ResultsPage />} />
+        <Route path="parts/:id" element={<PartPage />} />
+        <Route path="families" element={<FamilyListPage />} />
+        <Route path="families/:slug" element={<FamilyPage />} />
+        <Route path="workshops" element={<WorkshopListPage />} />
+        <Route path="workshops/:slug" element={<WorkshopPage />} />
       </Route>
       <Route element={<Layout />}>
+        <Route path="sign-in" element={<SignInPage />} />
+        <Route path="sign-up" element={<SignUpPage />} />
+        <Route path="check-your-mail" element={<CheckMailPage />} />
+        <Route path="verify-email" element={<VerifyEmailPage />} />
+        <Route path="forgot-password" element={<ForgotPasswordPage />} />
+        <Route path="reset-password" element={<ResetPasswordPage />} />
+        <Route path="account" element={<AccountPage />} />
+        <Route path="basket" element={<BasketPage />} />
+        <Route element={<SignedIn />}>
+          <Route path="checkout" element={<CheckoutPage sendVerification={<SendVerification />} />} />
+          <Route path="orders" element={<OrdersPage />} />
+          <Route path="orders/:id" element={<OrderPage />} />
+        </Route>
         <Route path="*" element={<NotFoundPage />} />
       </Route>
     </Routes>

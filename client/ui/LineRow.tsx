@@ -9,6 +9,8 @@ import { SizesLine } from "./SizesLine";
 
 type Props = {
   id?: string;
+  /** Of its heading: one below that of its parcel. */
+  level?: 3 | 4;
   partId: string;
   title: string;
   kind: ListingKind;
@@ -28,6 +30,7 @@ type Props = {
 /** A part that is being bought or was: drawn to scale, its sizes in a line, how many, how much. */
 export function LineRow({ partId, title, kind, dims, drawn, material, forNeed, scale, isBusy, ...rest }: Props) {
   const unit = useUnit();
+  const Heading = rest.level === 4 ? "h4" : "h3";
   return (
     <li
       id={rest.id}
@@ -42,11 +45,11 @@ export function LineRow({ partId, title, kind, dims, drawn, material, forNeed, s
         </p>
       )}
       <div className="grid content-start gap-1">
-        <h3 className="text-step1">
+        <Heading className="text-step1 font-semibold">
           <Link to={`/parts/${partId}`} className="inline-block min-h-6 no-underline hover:underline">
             {title}
           </Link>
-        </h3>
+        </Heading>
         {forNeed && <p>for: {forNeed}</p>}
         <SizesLine kind={kind} dims={dims} unit={unit} />
         {rest.notes}

@@ -1,14 +1,13 @@
 import { useEffect } from "react";
 import { formatMoney } from "#shared/domain/money";
 import type { BasketLine } from "#shared/schemas/basket";
-import { announce } from "../../lib/announcements";
 import { Button } from "../../ui/Button";
 import type { ComparedScale } from "../../ui/drawing/comparedScale";
 import { LineRow } from "../../ui/LineRow";
+import { MadeToSize } from "../../ui/MadeToSize";
 import { Money } from "../../ui/Money";
 import { useRemoveLine } from "./api";
 import { drawnOf } from "./drawnOf";
-import { MadeToSize } from "./MadeToSize";
 import { QuantityField } from "./QuantityField";
 import { useQuantity } from "./useQuantity";
 
@@ -18,13 +17,14 @@ type Props = {
   line: BasketLine;
   shipTo: string;
   scale: ComparedScale;
-  onRemoved: () => void;
+  /** It is about to be taken out: what could put it back is kept from now on. */
+  onRemove: () => void;
   /** Whether a quantity stands in the field that the basket did not take. */
   onUnsettled: (partId: string, isUnsettled: boolean) => void;
 };
 
 /** A line of the basket that can be changed. */
-export function BasketRow({ line, shipTo, scale, onRemoved, onUnsettled }: Props) {
+export function BasketRow({ line, shipTo, scale, onRemove, onUnsettled }: Props) {
   const { part, problem, lineMinor, unitMinor } = line;
   const quantity = useQuantity(line, shipTo);
   const remove = useRemoveLine(shipTo);
@@ -34,14 +34,10 @@ export function BasketRow({ line, shipTo, scale, onRemoved, onUnsettled }: Props
     return () => onUnsettled(part.id, false);
   }, [part.id, isUnsettled, onUnsettled]);
 
-  const onRemove = () => {
+  const takeOut = () => {
     quantity.stopWaiting();
-    remove.mutate(part.id, {
-      onSuccess: () => {
-        announce(`Removed ${part.title}`);
-        onRemoved();
-      },
-    });
+    onRemove();
+    remove.mutate(part.id);
   };
   return (
     <LineRow
@@ -73,7 +69,7 @@ export function BasketRow({ line, shipTo, scale, onRemoved, onUnsettled }: Props
           ) : (
             line.quantity > 1 && <p className="text-small text-soft">{formatMoney(unitMinor, part.currency)} each</p>
           )}
-          <Button look="quiet" disabled={remove.isPending} onClick={onRemove}>
+          <Button look="quiet" disabled={remove.isPending} onClick={takeOut}>
             Remove<span className="sr-only">: {part.title}</span>
           </Button>
           {remove.isError && (
