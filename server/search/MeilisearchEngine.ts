@@ -1,5 +1,4 @@
 import { type EnqueuedTaskPromise, type Index, Meilisearch, MeilisearchError } from "meilisearch";
-import type { Logger } from "pino";
 import type { CandidateQuery, CandidateRef, SearchEngine } from "../adapters/SearchEngine";
 import { edgeFields, type MeiliDocument, meiliDocuments } from "./meiliDocument";
 import { meiliFilter } from "./meiliFilter";
@@ -18,6 +17,9 @@ const settings = {
   rankingRules: ["words", "typo"],
   pagination: { maxTotalHits: mostHits },
 };
+
+/** What is told of a failure that was got round. */
+export type Warns = { warn(fields: { err: Error }, words: string): void };
 
 /** Waits for a write to be done. Errors: what the service says went wrong. */
 async function done(task: EnqueuedTaskPromise): Promise<void> {
@@ -38,7 +40,7 @@ export class MeilisearchEngine implements SearchEngine {
   constructor(
     { url, apiKey }: { url: string; apiKey?: string },
     private readonly database: SearchEngine,
-    private readonly logger?: Pick<Logger, "warn">,
+    private readonly logger?: Warns,
   ) {
     const client = new Meilisearch({
       host: url,
@@ -77,7 +79,7 @@ export class MeilisearchEngine implements SearchEngine {
 
   async #prepare(): Promise<void> {
     await done(this.#index.updateSettings(settings));
-    if ((await this.#index.getStats()).numberOfDocuments > 0) return;
+    if ((await this.#index.getDocuments({ limit: 1, fields: ["id"] })).total > 0) return;
     const parts = await select<{ id: string }>("SELECT id FROM parts WHERE state = 'published' ORDER BY id");
     for (let start = 0; start < parts.length; start += batch) {
       await this.#write(parts.slice(start, start + batch).map(({ id }) => id));
