@@ -25,7 +25,7 @@ export async function newOrder(parcelId: string, { config, logger }: Services): 
     action: { label: `See order ${number}`, url: `${config.publicUrl}/orders/${order.id}` },
     blocks: [
       { heading: "To make and pack" },
-      ...(await lineBlocks(lines, currency, logger)),
+      ...(await lineBlocks(lines, { currency, logger, madeToSize: "Made to the buyer's size" })),
       { heading: "Send to" },
       { lines: addressLines(order.shippingAddress) },
       { heading: "Your share" },
@@ -35,7 +35,7 @@ export async function newOrder(parcelId: string, { config, logger }: Services): 
           ["Postage", money(parcel.shippingMinor)],
           ["Commission", money(-parcel.commissionMinor)],
           ["Your share", money(parcel.totalMinor - parcel.commissionMinor)],
-          ["Tax contained, yours to pay on", money(parcel.taxMinor)],
+          ...(parcel.taxMinor > 0 ? [["Tax contained, yours to pay on", money(parcel.taxMinor)] as const] : []),
         ],
       },
     ],

@@ -92,7 +92,11 @@ export async function orderConfirmation(orderId: string, { config, logger }: Ser
   for (const one of read) {
     parcels.push(
       { heading: `Parcel from ${one.workshop.name}, ${one.workshop.town}` },
-      ...(await lineBlocks(one.lines, currency, logger)),
+      ...(await lineBlocks(one.lines, {
+        currency,
+        logger,
+        madeToSize: "Made to your size: no withdrawal without a reason",
+      })),
       parcelFacts(one, shippingAddress.country, currency),
       seller(one.parcel.trader),
       ...(one.workshop.returnsTerms ? [{ paragraph: `Its terms for returns: ${one.workshop.returnsTerms}` }] : []),

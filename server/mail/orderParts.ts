@@ -21,8 +21,11 @@ const offerNotes = {
   "re-mould": ["Re-mould: the old core is sent in"],
 };
 
-/** Lines of a parcel, each with its drawing. */
-export function lineBlocks(lines: readonly OrderLine[], currency: string, logger: Logger): Promise<Block[]> {
+/** Lines of a parcel, each with its drawing; `madeToSize` is what the reader is told of a line made to size. */
+export function lineBlocks(
+  lines: readonly OrderLine[],
+  { currency, madeToSize, logger }: { currency: string; madeToSize: string; logger: Logger },
+): Promise<Block[]> {
   const money = (minor: number) => formatMoney(minor, currency);
   return Promise.all(
     lines.map(async (line) => ({
@@ -30,10 +33,7 @@ export function lineBlocks(lines: readonly OrderLine[], currency: string, logger
         title: line.title,
         sizes: sizesText(line.listing),
         forNeed: line.forNeed,
-        notes: [
-          ...offerNotes[line.listing.offerType],
-          ...(line.madeToSize ? ["Made to your size: no withdrawal without a reason"] : []),
-        ],
+        notes: [...offerNotes[line.listing.offerType], ...(line.madeToSize ? [madeToSize] : [])],
         amount: `${line.quantity} x ${money(line.unitMinor)} = ${money(line.lineMinor)}`,
         picture: await partPicture(`${line.id}@idlewright`, line.listing, logger),
       },
