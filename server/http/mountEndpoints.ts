@@ -41,11 +41,11 @@ export function actorOf(req: Request): Actor | null {
 async function serve(endpoint: Endpoint, limits: RateLimits, req: Request, res: Response): Promise<void> {
   const actor = actorOf(req);
   await limits.spend(endpoint, actor, req);
-  if (endpoint.method !== "get" && !endpoint.pure) requireOwnPage(req);
   if (endpoint.access !== "anyone") {
     if (!actor) throw new AppError("not-signed-in");
     if (endpoint.access !== "signed-in" && !endpoint.access.includes(actor.role)) throw new AppError("not-allowed");
   }
+  if (endpoint.method !== "get" && !endpoint.pure) requireOwnPage(req);
 
   const answer = await endpoint.run({
     actor,

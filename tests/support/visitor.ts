@@ -17,6 +17,8 @@ export async function visitor(site: TestSite) {
     refresh,
     get: (to: string) => agent.get(path(to)),
     post: (to: string, body: object = {}) => send(agent.post(path(to))).send(body),
+    /** A POST whose body is given afterwards, whatever it is. */
+    raw: (to: string) => send(agent.post(path(to))),
     put: (to: string, body: object = {}) => send(agent.put(path(to))).send(body),
     patch: (to: string, body: object = {}) => send(agent.patch(path(to))).send(body),
     delete: (to: string) => send(agent.delete(path(to))),

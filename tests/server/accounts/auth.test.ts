@@ -15,8 +15,12 @@ const goodPassword = "a long walk by the canal";
 
 /** The token that a queued mail carries in its link. */
 async function tokenFor(email: string, template: string): Promise<string> {
-  const mail = await Mail.findOne({ where: { recipient: email, template }, order: [["createdAt", "DESC"]] });
-  return (mail?.payload as { url: string }).url.split("#")[1] ?? "";
+  const mail = await Mail.findOne({
+    where: { recipient: email, template },
+    order: [["createdAt", "DESC"]],
+    rejectOnEmpty: true,
+  });
+  return (mail.payload as { url: string }).url.split("#")[1] ?? "";
 }
 
 describe("sign-up", () => {
