@@ -22,7 +22,8 @@ export const roundedSize = (mm: number, unit: SizeUnit): string =>
 
 /** A nominal and its tolerance with decimals that agree: 44.2 +/- 0.15 gives "44.20" and "0.15". */
 export function statedNumbers(nominalMm: number, plusMinusMm: number, unit: SizeUnit): [string, string] {
-  if (unit === "in") return [roundDecimal(nominalMm / perInch, 3), roundDecimal(plusMinusMm / perInch, 4)];
+  if (unit === "in")
+    return [roundDecimal(nominalMm / perInch, 3), roundDecimal(plusMinusMm / perInch, plusMinusMm < 0.03 ? 4 : 3)];
   const decimals = Math.max(1, decimalsOf(nominalMm, 3), decimalsOf(plusMinusMm, 3));
   return [roundDecimal(nominalMm, decimals), roundDecimal(plusMinusMm, Math.max(1, decimalsOf(plusMinusMm, 3)))];
 }

@@ -1,7 +1,7 @@
 import { useQuery } from "@tanstack/react-query";
 import { type FormEvent, lazy, type ReactNode, Suspense, useEffect, useRef } from "react";
 import { flushSync } from "react-dom";
-import { useNavigate } from "react-router-dom";
+import { useLocation, useNavigate } from "react-router-dom";
 import { type Condition, conditionFacts, conditionsFor } from "#shared/domain/conditions";
 import { countryName } from "#shared/domain/countries";
 import { type Instrument, instrumentFacts, instruments } from "#shared/domain/instruments";
@@ -43,6 +43,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   const families = useQuery(familiesQuery).data?.items ?? [];
   const countries = useQuery(countriesQuery).data?.items ?? [];
   const navigate = useNavigate();
+  const location = useLocation();
   const form = useRef<HTMLFormElement>(null);
   const problems = lengthProblems(values);
   const isMeasured = conditionFacts[condition].hasReadings;
@@ -70,7 +71,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
       return;
     }
     keepShipTo(shipTo);
-    void navigate(`${action}?${needParams(values)}`);
+    void navigate(`${action}?${needParams(values)}`, { state: location.pathname === action ? location.state : null });
   };
 
   const familyName = families.find(({ slug }) => slug === family)?.name ?? family;

@@ -11,6 +11,7 @@ import { PutInBasket } from "../../ui/PutInBasket";
 import { SizeTable } from "../../ui/SizeTable";
 import { VerdictMark } from "../../ui/VerdictMark";
 import { drawnOf, type RowScale, rowDrawing } from "./drawnOf";
+import type { FromResults } from "./StripBar";
 
 type Props = {
   item: SearchItem;
@@ -21,6 +22,8 @@ type Props = {
   scale: RowScale | undefined;
   isLit?: boolean;
   onLight?: (partId: string | null) => void;
+  /** The way back from the part’s page. */
+  from: FromResults;
   /** The one size that fails, in place of the fit's own reason. */
   failing?: string;
 };
@@ -54,7 +57,7 @@ function Price({ item, need }: { item: SearchItem; need: Need }) {
 }
 
 /** One part as a row: drawn to scale, what it is and how surely it fits, its sizes, what it costs delivered. */
-export function PartRow({ item, need, needQuery, unit, scale, isLit, onLight, failing }: Props) {
+export function PartRow({ item, need, needQuery, unit, scale, isLit, onLight, from, failing }: Props) {
   const { part, workshop, fit, kitLineId, evidence } = item;
   const drawn = drawnOf(item);
   const kitLine = part.kitLines.find(({ id }) => id === kitLineId);
@@ -89,7 +92,7 @@ export function PartRow({ item, need, needQuery, unit, scale, isLit, onLight, fa
       </div>
       <div style={{ gridArea: "words" }} className="grid content-start gap-1">
         <h3 className="text-step1">
-          <Link to={`/parts/${part.id}?${needQuery}`} className="no-underline hover:underline">
+          <Link to={`/parts/${part.id}?${needQuery}`} state={from} className="no-underline hover:underline">
             {part.title}
           </Link>
         </h3>

@@ -1,5 +1,6 @@
 import { dimensionWords } from "#shared/domain/partKinds";
 import type { SearchAnswer } from "#shared/schemas/search";
+import { capitalised } from "../../lib/capitalised";
 import { roundedSize, type SizeUnit } from "../../lib/formatSize";
 import { Button } from "../../ui/Button";
 import { RuledHeading } from "../../ui/RuledHeading";
@@ -14,8 +15,6 @@ type Props = {
   litId: string | null;
   onLight: (partId: string | null) => void;
 };
-
-const capitalised = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 function pick(partId: string) {
   const row = document.getElementById(rowId(partId));

@@ -1,4 +1,5 @@
 import { useMemo, useState } from "react";
+import { useLocation } from "react-router-dom";
 import type { PartKind } from "#shared/domain/partKinds";
 import { sharedScale } from "#shared/drawing/sharedScale";
 import type { SearchAnswer } from "#shared/schemas/search";
@@ -52,7 +53,8 @@ export function Results({ pages, unit, needQuery, needKey, isStale, hasMore, isF
     const kind = drawnOf(item)?.kind;
     return kind ? scales.get(kind) : undefined;
   };
-  const row = { need, needQuery, unit, onLight: setLit };
+  const { pathname, search } = useLocation();
+  const row = { need, needQuery, unit, onLight: setLit, from: { backTo: `${pathname}${search}`, total } };
 
   return (
     <>

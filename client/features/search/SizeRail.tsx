@@ -139,7 +139,7 @@ export function SizeRail(props: Props) {
           wider
         </Button>
         <Button look="quiet" disabled={!railView.canGoWider} onClick={railView.fit}>
-          at all
+          everything
         </Button>
       </div>
     </div>
