@@ -88,7 +88,7 @@ export class TaskQueue {
   }
 
   #schedule(): void {
-    if (this.#scheduled || this.#held) return;
+    if (this.#scheduled) return;
     this.#scheduled = true;
     setImmediate(() => {
       this.#scheduled = false;
