@@ -17,6 +17,7 @@ const WorkshopListPage = lazy(async () => ({
 const WorkshopPage = lazy(async () => ({
   default: (await import("../features/workshops/WorkshopPage")).WorkshopPage,
 }));
+const WorkingPage = lazy(async () => ({ default: (await import("../features/working/WorkingPage")).WorkingPage }));
 const SignInPage = lazy(async () => ({ default: (await import("../features/account/SignInPage")).SignInPage }));
 const SignUpPage = lazy(async () => ({ default: (await import("../features/account/SignUpPage")).SignUpPage }));
 const CheckMailPage = lazy(async () => ({
@@ -56,6 +57,7 @@ export function AppRoutes() {
         <Route path="families/:slug" element={<FamilyPage />} />
         <Route path="workshops" element={<WorkshopListPage />} />
         <Route path="workshops/:slug" element={<WorkshopPage />} />
+        <Route path="working" element={<WorkingPage />} />
       </Route>
       <Route element={<Layout />}>
         <Route path="sign-in" element={<SignInPage />} />
