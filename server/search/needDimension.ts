@@ -1,14 +1,14 @@
 import { type AcceptedBand, defaultBand } from "#shared/domain/acceptedBands";
 import { estimateAsNew } from "#shared/domain/asNew";
 import type { Condition } from "#shared/domain/conditions";
-import { type Instrument, instrumentFacts } from "#shared/domain/instruments";
+import type { Instrument } from "#shared/domain/instruments";
 import { formatLength } from "#shared/domain/length";
 import { type DimensionName, dimensionWords, type PartKind } from "#shared/domain/partKinds";
 import type { NeedDimension } from "#shared/schemas/need";
 import type { RegisterSize } from "./familyRegister";
 
 /** A size as it was written, and what was understood. */
-export type Reading = { dimension: DimensionName; text: string; mm: number; resolutionMm: number; echo: string };
+export type Reading = { dimension: DimensionName; text: string; mm: number; roundedToMm: number; echo: string };
 
 /** Whose register is used, for the words. */
 export type RegisterOf = { pointName: string; familyName: string };
@@ -28,34 +28,14 @@ export function contradicts({ asNewMm, standardUncertaintyMm }: NeedDimension, {
   return outside > 3 * standardUncertaintyMm + (upperMm - lowerMm);
 }
 
-/**
- * What the last place written is worth, in mm. Whoever holds an instrument that shows hundredths does not round to whole
- * millimetres but leaves out zeros at the end, so a decimal number is taken to ten steps of the instrument at the coarsest.
- * A fraction is what the instrument showed. Common practice, no source.
- */
-function writtenTo({ text, resolutionMm, echo }: Reading, instrument: Instrument): { mm: number; words: string[] } {
-  const { stepMm, withArticle } = instrumentFacts[instrument];
-  const coarsest = 10 * stepMm;
-  const isFraction = /[/\u2044\u2215\u00bc-\u00be\u2150-\u215e]/.test(text);
-  if (isFraction || resolutionMm <= coarsest) return { mm: resolutionMm, words: [] };
-  const to = `${formatLength(coarsest, "mm", { decimals: 1 })}, since ${withArticle} shows ${formatLength(stepMm, "mm")}`;
-  return {
-    mm: coarsest,
-    words: [`“${echo}” is taken to ${to} and zeros at the end are often left out (common practice, no source).`],
-  };
-}
-
 /** A measured size as new, with the usual band around it. Errors: DomainError as `estimateAsNew`. */
 export function measuredDimension(
   kind: PartKind,
   reading: Reading,
   how: { instrument: Instrument; condition: Condition },
 ): NeedDimension {
-  const { dimension, text, mm, echo } = reading;
-  const { instrument, condition } = how;
-  const written = writtenTo(reading, instrument);
-  const input = { kind, dimension, readingsMm: [mm], resolutionMm: written.mm, instrument, condition };
-  const { asNew, basis } = estimateAsNew(input);
+  const { dimension, text, mm, roundedToMm, echo } = reading;
+  const { asNew, basis } = estimateAsNew({ kind, dimension, readingsMm: [mm], resolutionMm: roundedToMm, ...how });
   const band = defaultBand(kind, dimension, asNew.valueMm);
   return {
     dimension,
@@ -66,7 +46,7 @@ export function measuredDimension(
     standardUncertaintyMm: asNew.standardUncertaintyMm,
     ...band,
     bandFrom: "common-practice",
-    basis: [...written.words, ...basis, usual(band)],
+    basis: [...basis, usual(band)],
   };
 }
 

@@ -19,8 +19,8 @@ export function readLengths(query: NeedQuery): Reading[] {
     if (text === undefined) continue;
     const parsed = parseLength(text, query.unit);
     if (parsed.ok) {
-      const { mm, resolutionMm, echo } = parsed;
-      readings.push({ dimension, text, mm, resolutionMm, echo });
+      const { mm, roundedToMm, echo } = parsed;
+      readings.push({ dimension, text, mm, roundedToMm, echo });
     } else errors.push({ pointer: `#/${dimension}`, detail: parsed.problem });
   }
   if (errors.length > 0) throw refused(errors);

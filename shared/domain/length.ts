@@ -4,7 +4,7 @@ import { readNumber, type WrittenNumber } from "./readNumber";
 import { roundDecimal } from "./roundDecimal";
 
 export type ParsedLength =
-  | { ok: true; mm: number; resolutionMm: number; unit: LengthUnit; echo: string }
+  | { ok: true; mm: number; resolutionMm: number; unit: LengthUnit; echo: string; roundedToMm: number }
   | { ok: false; problem: string };
 
 /** The longest length that is read, in millimetres: no part of these machines comes near it. */
@@ -69,6 +69,9 @@ function echoOf(number: WrittenNumber, unit: LengthUnit, mm: number, resolutionM
  *
  * Units:      millimetres out. A number without a unit is in `defaultUnit`; a fraction without one is in inches.
  * Resolution: what the last place written is worth: the last decimal in its unit, or one over the denominator.
+ * Rounding:   a fraction was rounded to its denominator, and `roundedToMm` counts that step in the uncertainty. A
+ *             decimal is what the instrument showed: zeros at its end are often left out, so it adds no step of its own
+ *             (common practice, no source).
  * Ambiguity:  `echo` says what was understood. "1,234 mm" may be 1.234 or 1234 mm and is refused with both
  *             readings; where only one of them is a possible length ("1,736 in"), that one is taken and echoed.
  * Limits:     more than 0 and at most 10 m, 40 characters. Refusals are in plain words, never thrown.
@@ -104,7 +107,8 @@ export function parseLength(text: string, defaultUnit: "mm" | "in"): ParsedLengt
   if (!(mm > 0)) return refuse("A length must be more than zero.");
   const resolutionMm = toMm({ ...number, numerator: 1 }, unit);
   const note = named || unit === defaultUnit ? "" : " (a fraction without a unit is read as inches)";
-  return { ok: true, mm, resolutionMm, unit, echo: echoOf(number, unit, mm, resolutionMm) + note };
+  const roundedToMm = number.isFraction ? resolutionMm : 0;
+  return { ok: true, mm, resolutionMm, unit, echo: echoOf(number, unit, mm, resolutionMm) + note, roundedToMm };
 }
 
 /**

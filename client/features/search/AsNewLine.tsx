@@ -13,8 +13,15 @@ function estimateFor({ kind, lengths, unit, instrument, condition }: NeedValues,
   const read = parseLength(lengths[name] ?? "", unit);
   if (!read.ok) return null;
   try {
-    const { mm, resolutionMm } = read;
-    return estimateAsNew({ kind, dimension: name, readingsMm: [mm], instrument, condition, resolutionMm });
+    const { mm, roundedToMm } = read;
+    return estimateAsNew({
+      kind,
+      dimension: name,
+      readingsMm: [mm],
+      resolutionMm: roundedToMm,
+      instrument,
+      condition,
+    });
   } catch (error) {
     if (error instanceof DomainError) return null;
     throw error;
