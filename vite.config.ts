@@ -5,7 +5,14 @@ import { defineConfig } from "vitest/config";
 export default defineConfig({
   plugins: [react(), tailwindcss()],
   publicDir: "client/public",
-  build: { outDir: "dist/client", emptyOutDir: true, target: "es2022", manifest: true, sourcemap: false },
+  build: {
+    outDir: "dist/client",
+    emptyOutDir: true,
+    target: "es2022",
+    modulePreload: { polyfill: false },
+    manifest: true,
+    sourcemap: false,
+  },
   test: {
     projects: [
       {

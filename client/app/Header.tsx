@@ -1,4 +1,4 @@
-import { Link, NavLink } from "react-router-dom";
+import { Link, useLocation } from "react-router-dom";
 import { useBasketCount } from "../lib/basket";
 import { useSessionUser } from "../lib/session";
 import { Mark } from "../ui/Mark";
@@ -18,13 +18,16 @@ function Account() {
 }
 
 function HeaderLink({ to, words }: { to: string; words: string }) {
+  const { pathname } = useLocation();
+  const isHere = pathname === to || pathname.startsWith(`${to}/`);
   return (
-    <NavLink
+    <Link
       to={to}
+      aria-current={isHere ? "page" : undefined}
       className="inline-flex min-h-11 max-w-40 items-center border-b-2 border-transparent no-underline hover:border-rule aria-[current=page]:border-ink"
     >
       <span className="truncate">{words}</span>
-    </NavLink>
+    </Link>
   );
 }
 

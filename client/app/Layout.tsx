@@ -32,9 +32,9 @@ export function Layout({ hasStrip = false }: { hasStrip?: boolean }) {
       </a>
       <Header />
       {hasStrip && <StripBar />}
-      <main id="main" ref={main} tabIndex={-1} className="flex-1">
+      <main id="main" ref={main} tabIndex={-1} className="min-h-[85dvh] flex-1">
         <ErrorBoundary resetKey={pathname}>
-          <Suspense fallback={<div className="min-h-dvh" />}>
+          <Suspense fallback={null}>
             <Outlet />
           </Suspense>
         </ErrorBoundary>

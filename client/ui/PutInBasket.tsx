@@ -1,7 +1,7 @@
 import { Link } from "react-router-dom";
 import type { PartSummary } from "#shared/schemas/part";
 import { announce } from "../lib/announcements";
-import { usePartInBasket, usePutInBasket } from "../lib/basket";
+import { usePartInBasket, usePutInBasket } from "../lib/usePutInBasket";
 import { Button, type ButtonLook } from "./Button";
 
 type Props = {
