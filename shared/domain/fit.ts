@@ -18,14 +18,21 @@ export type FitInput = {
   /** What the service point accepts, where that is known. */
   bands?: ByDimension<AcceptedBand>;
 };
-export type DimensionFit = AcceptedBand & {
+export type SizeChance = AcceptedBand & {
   dimension: DimensionName;
   chance: number;
   /** Nominal less need; where only a band is known, less the middle of the band. */
   deviationMm: number;
   combinedUncertaintyMm: number;
-  reason: string;
 };
+export type FitChance = {
+  chance: number;
+  coverage: number;
+  dimensions: SizeChance[];
+  /** Sizes that matter and could not be checked. */
+  unchecked: DimensionName[];
+};
+export type DimensionFit = SizeChance & { reason: string };
 export type Fit = { chance: number; verdict: Verdict; coverage: number; dimensions: DimensionFit[]; reason: string };
 
 const isSize = (value: number) => value > 0 && value <= longestLengthMm;
@@ -59,7 +66,7 @@ function checkInput({ kind, need, part, bands = {} }: FitInput) {
   }
 }
 
-function fitOf(dimension: DimensionName, { kind, need, part, bands = {} }: FitInput): DimensionFit | undefined {
+function sizeChance(dimension: DimensionName, { kind, need, part, bands = {} }: FitInput): SizeChance | undefined {
   const needed = need[dimension];
   const stated = part[dimension];
   const band = bands[dimension] ?? (needed && defaultBand(kind, dimension, needed.valueMm));
@@ -68,7 +75,7 @@ function fitOf(dimension: DimensionName, { kind, need, part, bands = {} }: FitIn
   const { nominalMm } = stated;
   const { plusMinusMm } = partTolerance(stated);
   const combinedUncertaintyMm = rootSumSquare([needed?.standardUncertaintyMm ?? 0, rectangular(plusMinusMm)]);
-  const fit = {
+  return {
     dimension,
     chance: conformanceProbability(nominalMm, combinedUncertaintyMm, band),
     deviationMm: nominalMm - (needed?.valueMm ?? (lowerMm + upperMm) / 2),
@@ -76,7 +83,24 @@ function fitOf(dimension: DimensionName, { kind, need, part, bands = {} }: FitIn
     lowerMm,
     upperMm,
   };
-  return { ...fit, reason: dimensionReason(fit, nominalMm, needed?.valueMm) };
+}
+
+/**
+ * The figures of `assessFit` without its words, for ranking many parts: same shape, errors and source.
+ */
+export function fitChance(input: FitInput): FitChance | null {
+  checkInput(input);
+  const { kind, need, bands = {} } = input;
+  const dimensions = dimensionsOf(kind).flatMap((dimension) => sizeChance(dimension, input) ?? []);
+  if (dimensions.length === 0) return null;
+  const asked = kindFacts[kind].optional.filter((dimension) => need[dimension] || bands[dimension]);
+  const matters = [...kindFacts[kind].matters, ...asked];
+  return {
+    chance: dimensions.reduce((product, { chance }) => product * chance, 1),
+    coverage: dimensions.length / matters.length,
+    dimensions,
+    unchecked: matters.filter((name) => !dimensions.some(({ dimension }) => dimension === name)),
+  };
 }
 
 /**
@@ -90,21 +114,20 @@ function fitOf(dimension: DimensionName, { kind, need, part, bands = {} }: FitIn
  * Source:   JCGM 106:2012 7.4, with u^2 = u_need^2 + (plusMinus / sqrt 3)^2 (JCGM 100:2008 4.3.7, 5.1.2).
  */
 export function assessFit(input: FitInput): Fit | null {
-  checkInput(input);
-  const { kind, need, bands = {} } = input;
-  const checked = dimensionsOf(kind).flatMap((dimension) => fitOf(dimension, input) ?? []);
-  if (checked.length === 0) return null;
-
-  const asked = kindFacts[kind].optional.filter((dimension) => need[dimension] || bands[dimension]);
-  const matters = [...kindFacts[kind].matters, ...asked];
-  const chance = checked.reduce((product, dimension) => product * dimension.chance, 1);
-  const unchecked = matters.filter((name) => !checked.some(({ dimension }) => dimension === name));
+  const found = fitChance(input);
+  if (!found) return null;
+  const { need, part, bands = {} } = input;
+  const { chance, coverage, unchecked } = found;
+  const dimensions = found.dimensions.map((size) => ({
+    ...size,
+    reason: dimensionReason(size, part[size.dimension]!.nominalMm, need[size.dimension]?.valueMm),
+  }));
   return {
     chance,
     verdict: verdictOf(chance),
-    coverage: checked.length / matters.length,
-    dimensions: checked,
-    reason: fitReason(chance, checked, {
+    coverage,
+    dimensions,
+    reason: fitReason(chance, dimensions, {
       unmeasured: unchecked.filter((name) => !need[name] && !bands[name]),
       unstated: unchecked.filter((name) => need[name] || bands[name]),
     }),
