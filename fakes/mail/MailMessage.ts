@@ -1,4 +1,4 @@
-export type MailAttachment = {
+type MailAttachment = {
   filename: string;
   contentType: string;
   /** Bytes. */

@@ -1,6 +1,6 @@
 import { ApiError, type ErrorBody } from "./ApiError";
 
-export type TaskStatus = "enqueued" | "processing" | "succeeded" | "failed" | "canceled";
+type TaskStatus = "enqueued" | "processing" | "succeeded" | "failed" | "canceled";
 export const taskStatuses: readonly string[] = [
   "enqueued",
   "processing",

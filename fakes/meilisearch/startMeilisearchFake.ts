@@ -4,7 +4,7 @@ import { ApiError, type ErrorCode } from "./ApiError";
 import { createMeilisearchApp, type Failure } from "./createMeilisearchApp";
 import { World } from "./World";
 
-export type MeilisearchControl = {
+type MeilisearchControl = {
   /** The next `count` requests fail: with this answer (500 `internal` unless told), or by a broken connection. */
   failNext(count: number, failure?: { status?: number; code?: string; message?: string } | "drop"): void;
   /** Writes are accepted and stay "enqueued" until `releaseTasks`. */

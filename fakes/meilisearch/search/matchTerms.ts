@@ -23,14 +23,27 @@ function matchWord(term: Term, { words }: WordList, { disableOnAttributes }: Tol
   const [text = ""] = term.words;
   let best: TermMatch | null = null;
   for (const word of words) {
-    const most = disableOnAttributes.includes(word.field) ? 0 : term.typos;
-    const typos = countTypos(text, word.text, most, term.prefix);
+    const counted = typosBetween(term, text, word.text);
+    const typos = counted !== 0 && disableOnAttributes.includes(word.field) ? null : counted;
     if (typos === null || (best && typos > best.typos)) continue;
     if (!best || typos < best.typos) best = { typos, exact: false, places: [] };
     best.places.push(word);
     best.exact ||= word.text === text;
   }
   return best;
+}
+
+/** Documents share most of their words, so each is compared with a term only once. */
+const counts = new WeakMap<Term, Map<string, number | null>>();
+
+function typosBetween(term: Term, text: string, word: string): number | null {
+  const known = counts.get(term) ?? new Map<string, number | null>();
+  counts.set(term, known);
+  const typos = known.get(word);
+  if (typos !== undefined) return typos;
+  const counted = countTypos(text, word, term.typos, term.prefix);
+  known.set(word, counted);
+  return counted;
 }
 
 function matchPhrase(phrase: Term, { words }: WordList): TermMatch | null {
