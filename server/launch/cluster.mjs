@@ -16,6 +16,7 @@ import { takeLock, tryLock } from "./lock.mjs";
 import { freePort } from "./ports.mjs";
 import { read, succeeds } from "./run.mjs";
 import { keepSecrets } from "./secrets.mjs";
+import { onStop } from "./stops.mjs";
 
 /** @typedef {import("./clusterFolder.mjs").Place} Place */
 
@@ -42,7 +43,25 @@ full_page_writes = off
  * @param {string} name of its folder
  * @param {{ disposable?: boolean }} [options] a disposable one is fast, and made anew where it does not start
  */
-export async function openCluster(name, { disposable = false } = {}) {
+export async function openCluster(name, options = {}) {
+  const opening = open(name, options);
+  // Told to stop while it opens, we wait for that, and close it then.
+  const forget = onStop(() => opening.then(({ close }) => close()).catch(() => undefined));
+  const cluster = await opening;
+  return {
+    ...cluster,
+    close() {
+      forget();
+      return cluster.close();
+    },
+  };
+}
+
+/**
+ * @param {string} name
+ * @param {{ disposable?: boolean }} options
+ */
+async function open(name, { disposable = false }) {
   const place = await clusterPlace(name);
   const lockPath = join(place.folder, "changing.lock");
   const usersPath = join(place.folder, "users.lock");
@@ -169,5 +188,5 @@ async function stopCluster(place) {
 async function postgres(place, program, args) {
   const { PATH, TZ } = process.env;
   const [command, all] = asOwner(place, [`${postgresBin}/${program}`, ...args]);
-  return read(command, all, { cwd: "/", env: { PATH, TZ, LANG: "C.UTF-8" } });
+  return read(command, all, { cwd: "/", env: { PATH, TZ, LANG: "C.UTF-8" }, letFinish: true });
 }

@@ -5,7 +5,6 @@ import { LaunchError } from "./LaunchError.mjs";
 import { takeLock, tryLock } from "./lock.mjs";
 import { inData } from "./paths.mjs";
 import { keepSecrets } from "./secrets.mjs";
-import { onStop } from "./stops.mjs";
 
 const most = 9;
 
@@ -17,9 +16,8 @@ const most = 9;
  */
 export async function takePlace() {
   for (let number = 1; number <= most; number++) {
-    const release = await tryLock(inData("locks", `demo-${number}`));
-    if (!release) continue;
-    onStop(release);
+    // Held until this process ends.
+    if (!(await tryLock(inData("locks", `demo-${number}`)))) continue;
     return { number, suffix: number === 1 ? "" : `-${number}` };
   }
   throw new LaunchError(`${most} starts of this checkout are running already.`);
@@ -47,7 +45,6 @@ export async function openDemoDatabase(given, suffix) {
     return { databaseUrl: given, dataDir: inData(`store-${name}`), words: "the one in DATABASE_URL" };
   }
   const cluster = await openCluster("pg");
-  onStop(cluster.close);
   const databaseUrl = await keepDatabase(cluster, `idlewright${suffix.replace("-", "_")}`);
   const words = `PostgreSQL 15 of our own on 127.0.0.1:${cluster.port}`;
   return { databaseUrl, dataDir: inData(`store${suffix}`), words };

@@ -4,10 +4,9 @@ import { dirname } from "node:path";
 import { LaunchError } from "./LaunchError.mjs";
 import { logFile, root } from "./paths.mjs";
 import { lastLines } from "./run.mjs";
+import { onStop } from "./stops.mjs";
 
 const stopMs = 30_000;
-
-/** @typedef {{ ready: true, addresses?: Record<string, string> }} Ready */
 
 /**
  * Starts one of our own programs, which says `{ ready: true }` over IPC once it serves.
@@ -36,15 +35,30 @@ export function startProgram(name, file, env) {
     child.once("error", (error) => done(error.message));
     child.once("close", (code, signal) => done(signal ?? `exit code ${code}`));
   });
-  /** @type {Promise<Ready>} */
-  const ready = new Promise((done) => {
+  /** @type {Promise<void>} */
+  const told = new Promise((done) => {
     child.on("message", (message) => {
-      if (typeof message === "object" && message && "ready" in message) done(/** @type {Ready} */ (message));
+      if (typeof message === "object" && message && "ready" in message) done();
     });
   });
-  const failure = ended.then((how) => {
-    return new LaunchError(`The ${name} stopped by itself (${how}).\n${lastLines(log)}`);
-  });
+  const failure = ended.then((how) => new LaunchError(`${name} stopped by itself (${how}).\n${lastLines(log)}`));
+  const ready = Promise.race([
+    told,
+    failure.then((error) => {
+      throw error;
+    }),
+  ]);
+  // Whoever starts several waits for one of them: the failure of another is not lost, `failure` has it.
+  ready.catch(() => undefined);
+
+  /** Asks it to end, waits, and after 30 s ends it. */
+  const stop = async () => {
+    child.kill("SIGTERM");
+    const timer = setTimeout(() => child.kill("SIGKILL"), stopMs);
+    await ended;
+    clearTimeout(timer);
+  };
+  void ended.then(onStop(stop));
 
   return {
     name,
@@ -52,18 +66,7 @@ export function startProgram(name, file, env) {
     /** Resolves with an error in words when it ends, asked to or not. */
     failure,
     /** Resolves when it serves; LaunchError where it ends instead. */
-    ready: Promise.race([
-      ready,
-      failure.then((error) => {
-        throw error;
-      }),
-    ]),
-    /** Asks it to end, waits, and after 30 s ends it. */
-    async stop() {
-      child.kill("SIGTERM");
-      const timer = setTimeout(() => child.kill("SIGKILL"), stopMs);
-      await ended;
-      clearTimeout(timer);
-    },
+    ready,
+    stop,
   };
 }

@@ -26,15 +26,16 @@ export async function run(command, args, { log, env = process.env, cwd = root })
 }
 
 /**
- * Runs a command and gives what it printed; `input` goes to its standard input.
+ * Runs a command and gives what it printed; `input` goes to its standard input. One that must not be cut short, and
+ * is short itself, is let finish where we are told to stop.
  *
  * Errors: LaunchError with what it printed as errors where it fails.
  *
  * @param {string} command
  * @param {string[]} args
- * @param {{ input?: string, env?: NodeJS.ProcessEnv, cwd?: string }} [options]
+ * @param {{ input?: string, env?: NodeJS.ProcessEnv, cwd?: string, letFinish?: boolean }} [options]
  */
-export async function read(command, args, { input = "", env = process.env, cwd = root } = {}) {
+export async function read(command, args, { input = "", env = process.env, cwd = root, letFinish = false } = {}) {
   const child = spawn(command, args, { cwd, env, stdio: "pipe" });
   const text = { out: "", err: "" };
   child.stdout.on("data", (chunk) => {
@@ -45,7 +46,7 @@ export async function read(command, args, { input = "", env = process.env, cwd =
   });
   child.stdin.on("error", () => undefined);
   child.stdin.end(input);
-  const result = await ended(child);
+  const result = await ended(child, letFinish);
   if (result !== "0") throw new LaunchError(`${command} failed (${result}): ${text.err.trim()}`);
   return text.out.trim();
 }
@@ -61,18 +62,19 @@ export async function succeeds(command, args) {
 }
 
 /**
- * The exit code or signal of a child, as text; it is ended with us if we are told to stop.
+ * The exit code or signal of a child, as text. If we are told to stop we end it, or let it finish.
  * @param {import("node:child_process").ChildProcess} child
+ * @param {boolean} [letFinish]
  * @returns {Promise<string>}
  */
-export async function ended(child) {
+export async function ended(child, letFinish = false) {
   /** @type {Promise<string>} */
   const result = new Promise((done) => {
     child.once("error", (error) => done(error.message));
     child.once("close", (code, signal) => done(String(code ?? signal)));
   });
   const forget = onStop(() => {
-    child.kill("SIGTERM");
+    if (!letFinish) child.kill("SIGTERM");
     return result;
   });
   return result.finally(forget);

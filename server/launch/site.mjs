@@ -2,6 +2,7 @@ import { join } from "node:path";
 import { setTimeout as delay } from "node:timers/promises";
 import { LaunchError } from "./LaunchError.mjs";
 import { logFile } from "./paths.mjs";
+import { freePort } from "./ports.mjs";
 import { startProgram } from "./program.mjs";
 import { run } from "./run.mjs";
 
@@ -38,45 +39,42 @@ export async function seedSite(site) {
 }
 
 /**
- * Starts the stand-ins for other people's services and the server, and waits until it answers that it is ready.
- * Stopping ends the server first, so that it can still reach what it uses.
+ * Starts the stand-ins for other people's services and the server, at once, and waits until it answers that it is
+ * ready. Stopping ends the server first, so that it can still reach what it uses.
  *
  * Errors: LaunchError where one of them does not come up; what had started is stopped again.
  *
  * @param {Site} site
  */
 export async function startSite(site) {
-  const { build, port, suffix = "", secrets } = site;
-  const url = `http://127.0.0.1:${port}`;
+  const { build, port, publicUrl, suffix = "", secrets } = site;
+  const localUrl = `http://127.0.0.1:${port}`;
+  const [stripePort, smtpPort, mailPort] = [await freePort(), await freePort(), await freePort()];
+  const stripeUrl = `http://127.0.0.1:${stripePort}`;
+  const mailUrl = `http://127.0.0.1:${mailPort}`;
+
   const fakes = startProgram(`stand-ins${suffix}`, join(build, "fakes/main.js"), {
     ...process.env,
     STRIPE_SECRET_KEY: secrets.paymentKey,
     STRIPE_WEBHOOK_SECRET: secrets.webhook,
-    STRIPE_WEBHOOK_URL: `${url}/api/v1/webhooks/stripe`,
+    STRIPE_WEBHOOK_URL: `${localUrl}/api/v1/webhooks/stripe`,
+    STRIPE_FAKE_PORT: String(stripePort),
+    MAIL_FAKE_SMTP_PORT: String(smtpPort),
+    MAIL_FAKE_HTTP_PORT: String(mailPort),
   });
-  const programs = [fakes];
+  const server = startProgram(
+    `server${suffix}`,
+    join(build, "server/main.js"),
+    settingsOf(site, { stripe: stripeUrl, smtp: `smtp://127.0.0.1:${smtpPort}`, mail: mailUrl }),
+  );
+  const programs = [server, fakes];
   const stop = async () => {
-    for (let program = programs.pop(); program; program = programs.pop()) await program.stop();
+    for (const program of programs) await program.stop();
   };
   try {
-    const { addresses = {} } = await fakes.ready;
-    const { stripe = "", smtp = "", mail = "" } = addresses;
-    const server = startProgram(
-      `server${suffix}`,
-      join(build, "server/main.js"),
-      settingsOf(site, { stripe, smtp, mail }),
-    );
-    programs.push(server);
-    await server.ready;
-    await answersReady(url, server.failure);
-    return {
-      url: site.publicUrl ?? url,
-      localUrl: url,
-      mailUrl: mail,
-      stripeUrl: stripe,
-      programs: [server, fakes],
-      stop,
-    };
+    await Promise.all(programs.map(({ ready }) => ready));
+    await answersReady(localUrl, server.failure);
+    return { url: publicUrl ?? localUrl, localUrl, mailUrl, stripeUrl, programs, stop };
   } catch (error) {
     await stop();
     throw error;

@@ -5,10 +5,10 @@ import { describeSite } from "./describeSite.mjs";
 import { LaunchError } from "./LaunchError.mjs";
 import { checkNodeVersion } from "./nodeVersion.mjs";
 import { installPackages } from "./packages.mjs";
-import { choosePort } from "./ports.mjs";
+import { choosePort, probePort } from "./ports.mjs";
 import { say, secondsSince, step } from "./progress.mjs";
 import { migrateSite, seedSite, startSite } from "./site.mjs";
-import { listenForStop, onStop, stopAll } from "./stops.mjs";
+import { listenForStop, stopAll } from "./stops.mjs";
 
 const since = performance.now();
 const { PORT, HOST, PUBLIC_URL, DATABASE_URL } = process.env;
@@ -33,12 +33,14 @@ async function end(code, words) {
   process.exit(code);
 }
 
-/** Everything that a demo needs, in order; each step undoes itself through `onStop`. */
+/** Everything that a demo needs, in order; what is started is remembered for `stopAll`. */
 async function bringUp() {
   checkNodeVersion();
   if (PORT) await choosePort(PORT, HOST);
-  await step("packages", installPackages);
-  await step("debian", (note) => installDebianPackages(DATABASE_URL ? [] : ["database"], note));
+  await Promise.all([
+    step("debian", (note) => installDebianPackages(DATABASE_URL ? [] : ["database"], note)),
+    step("packages", installPackages),
+  ]);
 
   const { number, suffix } = await takePlace();
   if (number > 1) say(`  Another start of this checkout is running; this is number ${number}, with data of its own.`);
@@ -46,10 +48,9 @@ async function bringUp() {
 
   let build = "";
   await step("build", async (note) => {
-    const kept = await keepBuild(note);
-    onStop(kept.release);
-    build = kept.folder;
-    return kept.fresh ? "client and server built" : "nothing changed";
+    const { folder, fresh } = await keepBuild(note);
+    build = folder;
+    return fresh ? "client and server built" : "nothing changed";
   });
 
   let place = { databaseUrl: "", dataDir: "" };
@@ -63,8 +64,7 @@ async function bringUp() {
   await step("demo data", () => seedSite({ ...settings, port: 0 }));
 
   await step("server", async () => {
-    const site = await startSite({ ...settings, port: await choosePort(PORT, HOST) });
-    onStop(site.stop);
+    const site = await startOnPort(settings);
     for (const program of site.programs) {
       void program.failure.then((error) => end(1, error.message));
     }
@@ -72,6 +72,23 @@ async function bringUp() {
     about = await describeSite(site);
     return `${site.url} is ready`;
   });
+}
+
+/**
+ * Starts the site on the port that was asked for or the first free one. Between finding a port free and listening on
+ * it another start may take it: then the next one is tried.
+ * @param {Omit<import("./site.mjs").Site, "port">} settings
+ */
+async function startOnPort(settings) {
+  for (let left = 3; ; left--) {
+    const port = await choosePort(PORT, HOST);
+    try {
+      return await startSite({ ...settings, port });
+    } catch (error) {
+      const wasTaken = (await probePort(port, HOST)) === null;
+      if (PORT || !wasTaken || left === 0) throw error;
+    }
+  }
 }
 
 say("Idlewright is starting.");

@@ -5,7 +5,7 @@ import { LaunchError } from "./LaunchError.mjs";
 import { checkNodeVersion } from "./nodeVersion.mjs";
 import { installPackages } from "./packages.mjs";
 import { say, secondsSince, step } from "./progress.mjs";
-import { listenForStop, onStop, stopAll } from "./stops.mjs";
+import { listenForStop, stopAll } from "./stops.mjs";
 import { openTestCluster } from "./testCluster.mjs";
 
 const since = performance.now();
@@ -21,31 +21,32 @@ listenForStop(async (signal) => {
   process.exit(130);
 });
 
+/** @returns {("database" | "browser")[]} */
+function neededPrograms() {
+  if (chosen.includes("browser")) return ["database", "browser"];
+  return chosen.includes("unit") || chosen.includes("server") ? ["database"] : [];
+}
+
 /** Puts in place what the chosen checks need, and gives the environment for the tests. */
 async function setUp() {
   checkNodeVersion();
-  await step("packages", installPackages);
+  await Promise.all([
+    step("debian", (note) => installDebianPackages(neededPrograms(), note)),
+    step("packages", installPackages),
+  ]);
   /** @type {NodeJS.ProcessEnv} */
   const env = {};
-  const onDatabase = chosen.some((name) => ["unit", "server", "browser"].includes(name));
-  if (onDatabase) {
-    await step("debian", (note) => {
-      return installDebianPackages(chosen.includes("browser") ? ["database", "browser"] : ["database"], note);
-    });
-  }
   if (chosen.includes("server") || chosen.includes("browser")) {
     await step("database", async () => {
       if (process.env.TEST_DATABASE_URL) return "the one in TEST_DATABASE_URL";
       const cluster = await openTestCluster();
-      onStop(cluster.close);
       env.TEST_DATABASE_URL = cluster.url;
       return "a PostgreSQL 15 for tests alone";
     });
   }
   if (chosen.includes("unit") || chosen.includes("browser")) {
     await step("build", async (note) => {
-      const { fresh, release } = await keepBuild(note);
-      onStop(release);
+      const { fresh } = await keepBuild(note);
       return fresh ? "client and server built" : "nothing changed";
     });
   }
