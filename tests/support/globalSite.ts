@@ -18,6 +18,7 @@ declare module "vitest" {
     siteUrl: string;
     mailUrl: string;
     stripeUrl: string;
+    siteDatabaseUrl: string;
   }
 }
 
@@ -82,6 +83,7 @@ export default async function globalSite(project: TestProject): Promise<() => Pr
     project.provide("siteUrl", site.url);
     project.provide("mailUrl", site.mailUrl);
     project.provide("stripeUrl", site.stripeUrl);
+    project.provide("siteDatabaseUrl", database.url);
     return close;
   } catch (error) {
     await close();
