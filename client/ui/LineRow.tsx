@@ -18,6 +18,8 @@ type Props = {
   /** What is drawn; null for a kit whose lines are not known here. */
   drawn: Drawable | null;
   material?: string | undefined;
+  /** Under the drawing: which part of a kit it shows. */
+  caption?: string | undefined;
   forNeed: string | null;
   scale: ComparedScale;
   isBusy?: boolean;
@@ -35,10 +37,10 @@ export function LineRow({ partId, title, kind, dims, drawn, material, forNeed, s
     <li
       id={rest.id}
       aria-busy={isBusy || undefined}
-      className="grid grid-cols-[auto_1fr] gap-x-5 gap-y-3 border-b border-rule py-5 md:grid-cols-[auto_1fr_10rem_8.5rem] print:break-inside-avoid"
+      className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-5 gap-y-3 border-b border-rule py-5 md:grid-cols-[auto_minmax(0,1fr)_10rem_8.5rem] print:break-inside-avoid"
     >
       {drawn ? (
-        <ComparedDrawing part={drawn} scale={scale} unit={unit} material={material} />
+        <ComparedDrawing part={drawn} scale={scale} unit={unit} material={material} caption={rest.caption} />
       ) : (
         <p className="grid h-[108px] w-[120px] place-content-center border border-dashed border-edge text-small text-soft">
           kit, not drawn
@@ -56,7 +58,7 @@ export function LineRow({ partId, title, kind, dims, drawn, material, forNeed, s
       </div>
       <div className="col-span-2 flex items-start justify-between gap-4 md:contents">
         <div>{rest.quantity}</div>
-        <div className="grid justify-items-end gap-0.5 text-right">{rest.price}</div>
+        <div className="grid content-start justify-items-end gap-0.5 text-right">{rest.price}</div>
       </div>
     </li>
   );

@@ -19,8 +19,9 @@ export function SizesLine({ kind, dims, unit }: Props) {
       {stated.map(({ name, numbers: [nominal, tolerance] }, index) => (
         <Fragment key={name}>
           {index > 0 && ", "}
+          <DimensionLabel name={name} />{" "}
           <span className="whitespace-nowrap">
-            <DimensionLabel name={name} /> <span className="font-semibold text-ink">{nominal}</span> ±{tolerance}
+            <span className="font-semibold text-ink">{nominal}</span> ±{tolerance}
           </span>
         </Fragment>
       ))}

@@ -9,7 +9,7 @@ export function TitleBlock({ cells, className = "" }: { cells: readonly TitleCel
       {cells.map(({ label, value, whole }) => (
         <div
           key={label}
-          className={`flex flex-col bg-ground px-3 py-2 last:odd:col-span-2 sm:grow print:bg-transparent ${whole ? "sm:min-w-36" : "sm:basis-0"}`}
+          className={`flex flex-col bg-ground px-3 py-2 last:odd:col-span-2 sm:grow print:bg-transparent ${whole ? "sm:min-w-36 sm:text-right" : "sm:basis-0"}`}
         >
           <dt className="text-small text-soft">{label}</dt>
           <dd className={whole ? "text-step1 font-bold" : ""}>{value}</dd>

@@ -1,5 +1,5 @@
 import { keepPreviousData, useQuery } from "@tanstack/react-query";
-import { useCallback, useMemo, useState } from "react";
+import { useMemo, useState } from "react";
 import { countryName } from "#shared/domain/countries";
 import { formatMoney } from "#shared/domain/money";
 import type { Basket } from "#shared/schemas/basket";
@@ -16,25 +16,21 @@ import { drawnOf } from "./drawnOf";
 import { EmptyBasket } from "./EmptyBasket";
 import { PendingOrder } from "./PendingOrder";
 import { ShipToSelect } from "./ShipToSelect";
+import { useUnsettled } from "./useUnsettled";
 import { type RemovedLine, withRemoved } from "./withRemoved";
 
 const count = (n: number, one: string) => `${n} ${one}${n === 1 ? "" : "s"}`;
 
 function Summary({ basket, shipTo, isStale }: { basket: Basket; shipTo: string; isStale: boolean }) {
   return (
-    <div className="grid gap-1">
-      <p className="text-step1 leading-9">
-        {count(basket.count, "piece")} in {count(basket.parcels.length, "parcel")}, sent to{" "}
-        <ShipToSelect shipTo={shipTo} />:{" "}
-        <strong className={isStale ? "font-bold text-soft" : "font-bold"}>
-          {formatMoney(basket.totalMinor, basket.currency)}
-        </strong>{" "}
-        with postage and tax.
-      </p>
-      <p role="status" className="min-h-5 text-small text-soft">
-        {isStale && `Reckoning postage to ${countryName(shipTo)}`}
-      </p>
-    </div>
+    <p className="text-step1 leading-9">
+      {count(basket.count, "piece")} in {count(basket.parcels.length, "parcel")}, sent to{" "}
+      <ShipToSelect shipTo={shipTo} />:{" "}
+      <strong className={isStale ? "font-bold text-soft" : "font-bold"}>
+        {formatMoney(basket.totalMinor, basket.currency)}
+      </strong>{" "}
+      {basket.canCheckOut ? "with postage." : "so far."}
+    </p>
   );
 }
 
@@ -53,16 +49,7 @@ export function BasketPage() {
     placeholderData: keepPreviousData,
   });
   const [removed, setRemoved] = useState<RemovedLine[]>([]);
-  const [unsettled, setUnsettled] = useState<ReadonlySet<string>>(new Set());
-  const onUnsettled = useCallback((partId: string, isUnsettled: boolean) => {
-    setUnsettled((now) => {
-      if (now.has(partId) === isUnsettled) return now;
-      const next = new Set(now);
-      if (isUnsettled) next.add(partId);
-      else next.delete(partId);
-      return next;
-    });
-  }, []);
+  const [unsettled, onUnsettled] = useUnsettled();
 
   const sections = useMemo(() => withRemoved(basket?.parcels ?? [], removed), [basket, removed]);
   const scale = useMemo(
@@ -71,13 +58,18 @@ export function BasketPage() {
   );
   const isEmpty = basket?.count === 0;
   return (
-    <div className="page grid gap-9 py-8">
+    <div className="page grid grid-cols-1 gap-9 py-8">
       <header className="grid gap-3">
         <h1>Basket</h1>
         {basket && !isEmpty && (
           <>
             <Summary basket={basket} shipTo={shipTo} isStale={isPlaceholderData} />
-            <ScaleBar pxPerMm={scale.pxPerMm} unit={unit} />
+            <div className="flex flex-wrap items-center gap-x-6">
+              <ScaleBar pxPerMm={scale.pxPerMm} unit={unit} />
+              <p role="status" className="text-small text-soft">
+                {isPlaceholderData && `Reckoning postage to ${countryName(shipTo)}`}
+              </p>
+            </div>
           </>
         )}
       </header>

@@ -7,7 +7,8 @@ import { LineRow } from "../../ui/LineRow";
 import { MadeToSize } from "../../ui/MadeToSize";
 import { Money } from "../../ui/Money";
 import { useRemoveLine } from "./api";
-import { drawnOf } from "./drawnOf";
+import { captionOf, drawnOf } from "./drawnOf";
+import { KitContents } from "./KitContents";
 import { QuantityField } from "./QuantityField";
 import { useQuantity } from "./useQuantity";
 
@@ -47,13 +48,14 @@ export function BasketRow({ line, shipTo, scale, onRemove, onUnsettled }: Props)
       kind={part.kind}
       dims={part.dimensions}
       drawn={drawnOf(part)}
+      caption={captionOf(part)}
       material={part.material ?? undefined}
       forNeed={line.forNeed}
       scale={scale}
       isBusy={quantity.isPending || remove.isPending}
       notes={
         <>
-          {part.kind === "rebuild-kit" && <p className="text-soft">{part.kitLines.length} lines in the kit</p>}
+          {part.kind === "rebuild-kit" && <KitContents lines={part.kitLines} />}
           {line.madeToSize && <MadeToSize />}
           {problem && <p className="font-semibold text-outband">{problem}</p>}
         </>

@@ -34,7 +34,7 @@ export function CheckBeforePaying({ basket, isStale, isSending, problem }: Props
   );
   const isBlocked = !basket.canCheckOut;
   return (
-    <div className="grid gap-8" aria-busy={isStale}>
+    <div className="grid grid-cols-1 gap-8" aria-busy={isStale}>
       <ScaleBar pxPerMm={scale.pxPerMm} unit={unit} />
       {parcels.map((parcel, index) => (
         <CheckParcel

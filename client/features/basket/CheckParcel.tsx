@@ -6,7 +6,8 @@ import type { ComparedScale } from "../../ui/drawing/comparedScale";
 import { LineRow } from "../../ui/LineRow";
 import { MadeToSize } from "../../ui/MadeToSize";
 import { Money } from "../../ui/Money";
-import { drawnOf } from "./drawnOf";
+import { captionOf, drawnOf } from "./drawnOf";
+import { KitContents } from "./KitContents";
 import { ParcelHeading } from "./ParcelHeading";
 import { ParcelSums } from "./ParcelSums";
 
@@ -32,12 +33,13 @@ export function CheckParcel({ parcel, label, currency, scale }: Props) {
             kind={part.kind}
             dims={part.dimensions}
             drawn={drawnOf(part)}
+            caption={captionOf(part)}
             material={part.material ?? undefined}
             forNeed={line.forNeed}
             scale={scale}
             notes={
               <>
-                {part.kind === "rebuild-kit" && <p className="text-soft">{part.kitLines.length} lines in the kit</p>}
+                {part.kind === "rebuild-kit" && <KitContents lines={part.kitLines} />}
                 {line.madeToSize && <MadeToSize />}
                 {line.problem && <p className="font-semibold text-outband">{line.problem}</p>}
               </>

@@ -7,7 +7,7 @@ import { listFieldErrors } from "../../lib/listFieldErrors";
 import { keepShipTo, storedShipTo } from "../../lib/preferences";
 import { CheckField } from "../../ui/CheckField";
 import { FailureNotice } from "../../ui/FailureNotice";
-import { FormErrors } from "../../ui/FormErrors";
+import { type FormError, FormErrors } from "../../ui/FormErrors";
 import { AddressFields } from "./AddressFields";
 import type { SavedAddress } from "./api";
 import { BasketSkeleton } from "./BasketSkeleton";
@@ -20,10 +20,19 @@ import { WhereTo } from "./WhereTo";
 
 type Props = { userId: string; saved: readonly SavedAddress[]; sendVerification: ReactNode };
 
+/** Both addresses have the same fields: the summary says which is meant. */
+const errorsWithPlace = (errors: FormError[]): FormError[] =>
+  errors.map(({ field, message }) => ({
+    field,
+    message: field?.startsWith("billingAddress") ? `${message}, for the bill` : message,
+  }));
+
 /** Where to, who pays, what is bought: one form, nothing of which is lost. */
 export function CheckoutForm({ userId, saved, sendVerification }: Props) {
   const form = useForm<CheckoutValues>({
     resolver: checkoutResolver,
+    // The summary takes the focus, and leads to each field.
+    shouldFocusError: false,
     defaultValues: startValues(readDraft(userId), saved, storedShipTo()),
   });
   useEffect(() => {
@@ -42,8 +51,8 @@ export function CheckoutForm({ userId, saved, sendVerification }: Props) {
   const { errors, submitCount } = form.formState;
 
   return (
-    <form noValidate onSubmit={(event) => void form.handleSubmit(order)(event)} className="grid gap-10">
-      <FormErrors errors={listFieldErrors(errors)} attempt={submitCount} />
+    <form noValidate onSubmit={(event) => void form.handleSubmit(order)(event)} className="grid grid-cols-1 gap-10">
+      <FormErrors errors={errorsWithPlace(listFieldErrors(errors))} attempt={submitCount} />
       <fieldset disabled={isSending} className="contents">
         <Step number={1} title="Where to">
           <WhereTo form={form} saved={saved} />

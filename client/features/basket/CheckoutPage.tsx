@@ -20,7 +20,7 @@ export function CheckoutPage({ sendVerification }: { sendVerification: ReactNode
   const isSettled = addresses.data !== undefined || addresses.isError;
   return (
     <div className="page py-8">
-      <div className="grid max-w-4xl gap-8">
+      <div className="grid max-w-4xl grid-cols-1 gap-8">
         <h1>Check out</h1>
         <PendingOrder />
         {isEmpty && <EmptyBasket />}

@@ -3,7 +3,7 @@ import { taxWords } from "../../lib/taxWords";
 import { Money } from "../../ui/Money";
 import { TitleBlock } from "../../ui/TitleBlock";
 
-type Sums = Pick<BasketParcel, "partsMinor" | "shippingMinor" | "taxMinor" | "taxRatePercent" | "totalMinor">;
+type Sums = Pick<BasketParcel, "partsMinor" | "shippingMinor" | "taxMinor" | "taxRatePercent" | "totalMinor" | "problem">;
 
 /** What one parcel costs, in a title block. */
 export function ParcelSums({ parcel, currency, label }: { parcel: Sums; currency: string; label: string }) {
@@ -12,8 +12,11 @@ export function ParcelSums({ parcel, currency, label }: { parcel: Sums; currency
       className="mt-5"
       cells={[
         { label: "Parts", value: <Money minor={parcel.partsMinor} currency={currency} /> },
-        { label: "Postage", value: <Money minor={parcel.shippingMinor} currency={currency} /> },
-        { label: "Tax", value: taxWords(parcel, currency) },
+        {
+          label: "Postage",
+          value: parcel.problem ? "not sent there" : <Money minor={parcel.shippingMinor} currency={currency} />,
+        },
+        { label: "Tax", value: parcel.problem ? "not known" : taxWords(parcel, currency) },
         { label, value: <Money minor={parcel.totalMinor} currency={currency} />, whole: true },
       ]}
     />

@@ -74,7 +74,7 @@ export function OrderPage() {
 
   const isMissing = error instanceof ApiProblem && error.is("not-found");
   return (
-    <div className="page grid gap-9 py-8">
+    <div className="page grid grid-cols-1 gap-9 py-8">
       {order && (
         <>
           <header className="flex flex-wrap items-end justify-between gap-4">

@@ -30,7 +30,7 @@ export function OrdersPage() {
   const { data, error, isFetchingNextPage, hasNextPage, fetchNextPage, refetch } = useInfiniteQuery(ordersQuery);
   const orders = data?.pages.flatMap(({ items }) => items);
   return (
-    <div className="page grid gap-6 py-8">
+    <div className="page grid grid-cols-1 gap-6 py-8">
       <h1>Your orders</h1>
       {error && (
         <FailureNotice
