@@ -11,7 +11,13 @@ type PricedPart = Pick<
 >;
 type PricedWorkshop = Pick<Workshop, "id" | "name" | "state" | "dispatchDays" | "commissionBasisPoints">;
 
-export type WantedLine<P extends PricedPart = Part> = { part: P; quantity: number; forNeed: string | null };
+export type WantedLine<P extends PricedPart = Part> = {
+  part: P;
+  quantity: number;
+  forNeed: string | null;
+  /** Pieces of it that the same buyer's unpaid orders hold. */
+  heldAlready: number;
+};
 
 /** What one workshop asks for sending to one country. */
 export type Terms<W extends PricedWorkshop = Workshop> = {
@@ -59,7 +65,10 @@ export function totalsOf(parcels: readonly Totals[]): Totals {
   };
 }
 
-function problemOf({ part, quantity }: WantedLine<PricedPart>, workshop: PricedWorkshop): LineProblem | null {
+function problemOf(
+  { part, quantity, heldAlready }: WantedLine<PricedPart>,
+  workshop: PricedWorkshop,
+): LineProblem | null {
   if (part.state !== "published" || workshop.state !== "admitted") {
     return { name: "not-sold", words: "This is no longer sold: take it out of the basket" };
   }
@@ -74,6 +83,9 @@ function problemOf({ part, quantity }: WantedLine<PricedPart>, workshop: PricedW
   }
   const left = part.stockOnHand === null ? null : part.stockOnHand - part.stockReserved;
   if (left === null || left >= quantity) return null;
+  if (heldAlready > 0) {
+    return { name: "short", words: `Your own unpaid order holds ${heldAlready} of it: pay or cancel that order first` };
+  }
   return { name: "short", words: left > 0 ? `Only ${left} left: take fewer` : "None is left at the moment" };
 }
 

@@ -5,6 +5,7 @@ import { ShippingCountry } from "../models/ShippingCountry";
 import { ShippingRate } from "../models/ShippingRate";
 import { TaxRegistration } from "../models/TaxRegistration";
 import { Workshop } from "../models/Workshop";
+import { heldBy } from "../orders/stock";
 import { priceBasket, type Terms } from "./priceBasket";
 
 /** What each workshop asks for sending to a country. */
@@ -29,12 +30,16 @@ async function termsOf(ids: readonly string[], country: string, transaction?: Tr
 
 /**
  * A basket with its prices for one country, parcels in the order in which their first part was added.
- * `lock` also locks the parts, in the order of their ids, as everything that moves stock does.
+ * `buyerId` also says what that buyer's own unpaid orders hold; `lock` also locks the parts, in the order of their ids, as everything that moves stock does.
  */
 export async function readBasket(
   basketId: string,
   shipTo: string,
-  { transaction, lock = false }: { transaction?: Transaction; lock?: boolean } = {},
+  {
+    buyerId = null,
+    transaction,
+    lock = false,
+  }: { buyerId?: string | null; transaction?: Transaction; lock?: boolean } = {},
 ) {
   const rows = await BasketLine.findAll({
     where: { basketId },
@@ -51,9 +56,10 @@ export async function readBasket(
     ...(lock && transaction ? { lock: transaction.LOCK.NO_KEY_UPDATE } : {}),
   });
   const partOf = new Map(parts.map((part) => [part.id, part]));
+  const held = buyerId ? await heldBy(buyerId, transaction) : new Map<string, number>();
   const lines = rows.flatMap(({ partId, quantity, forNeed }) => {
     const part = partOf.get(partId);
-    return part ? [{ part, quantity, forNeed }] : [];
+    return part ? [{ part, quantity, forNeed, heldAlready: held.get(partId) ?? 0 }] : [];
   });
   const workshopIds = [...new Set(lines.map(({ part }) => part.workshopId))];
   const terms = await termsOf(workshopIds, shipTo, transaction);

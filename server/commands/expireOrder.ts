@@ -1,6 +1,8 @@
 import { inTransaction } from "../db/inTransaction";
+import { addJob } from "../jobs/addJob";
 import { Order } from "../models/Order";
 import { Payment } from "../models/Payment";
+import { expiryKey } from "../orders/holdLife";
 import { endPaymentPage } from "../payments/endPaymentPage";
 import type { Services } from "../Services";
 import { closeUnpaidOrder } from "./closeUnpaidOrder";
@@ -13,7 +15,12 @@ import { settlePayment } from "./settlePayment";
  */
 export async function expireOrder(services: Services, orderId: string, now = new Date()): Promise<void> {
   const order = await Order.findByPk(orderId);
-  if (order?.state !== "awaiting-payment" || (order.holdUntil && order.holdUntil > now)) return;
+  if (order?.state !== "awaiting-payment") return;
+  if (order.holdUntil && order.holdUntil > now) {
+    // The queue's clock runs before ours: once more, when the time has come.
+    const again = { runAt: order.holdUntil, key: expiryKey(orderId) };
+    return inTransaction((transaction) => addJob("expireOrder", { orderId }, transaction, again));
+  }
   const payment = await Payment.findOne({ where: { orderId }, rejectOnEmpty: true });
   // A page that we never learned of was due to close before the hold ends, at the provider's own clock.
   const paid = payment.sessionId ? await endPaymentPage(services.payments, payment.sessionId) : null;

@@ -4,14 +4,15 @@ import { type BasketOwner, takeBasket } from "../basket/basketOf";
 import { largestPaymentMinor } from "../basket/marketCurrency";
 import { database, inTransaction } from "../db/inTransaction";
 import { AppError } from "../errors/AppError";
+import type { Basket } from "../models/Basket";
 import { BasketLine } from "../models/BasketLine";
 import { Part } from "../models/Part";
 import { Workshop } from "../models/Workshop";
 
 const mostLines = 50;
 
-/** Puts a part in somebody's basket at this quantity, over what was there. Gives the basket's id. */
-export function putBasketLine(owner: BasketOwner, partId: string, input: PutBasketLine): Promise<string> {
+/** Puts a part in somebody's basket at this quantity, over what was there. Gives the basket. */
+export function putBasketLine(owner: BasketOwner, partId: string, input: PutBasketLine): Promise<Basket> {
   return inTransaction(async (transaction) => {
     const basket = await takeBasket(owner, transaction);
     const part = await Part.findByPk(partId, { transaction });
@@ -39,6 +40,6 @@ export function putBasketLine(owner: BasketOwner, partId: string, input: PutBask
         `A basket holds ${mostLines} different parts: pay these first, or take one out`,
       );
     }
-    return basket.id;
+    return basket;
   });
 }

@@ -12,7 +12,7 @@ import { AppError } from "../errors/AppError";
 import { addJob } from "../jobs/addJob";
 import { Order } from "../models/Order";
 import { User } from "../models/User";
-import { holdMs, mostWaitingOrders } from "../orders/holdLife";
+import { expiryKey, holdMs, mostWaitingOrders } from "../orders/holdLife";
 import { reserveStock } from "../orders/stock";
 import type { Actor } from "../policies/Actor";
 import { saveAddress } from "./saveAddress";
@@ -85,7 +85,11 @@ export function startOrder(
     if (known) return known;
     await refuseHoarding(actor.id, transaction);
 
-    const basket = await readBasket(basketId, input.shippingAddress.country, { transaction, lock: true });
+    const basket = await readBasket(basketId, input.shippingAddress.country, {
+      buyerId: actor.id,
+      transaction,
+      lock: true,
+    });
     if (basket.parcels.length === 0) throw new AppError("empty-basket");
     refuseWhatCannotBeBought(basket);
     refuseAnotherTotal(basket, input);
@@ -100,7 +104,7 @@ export function startOrder(
     const order = await writeOrder({ buyerId: actor.id, input, basket, listings, holdUntil }, transaction);
     await saveAddress(actor.id, input.shippingAddress, transaction);
     await audit({ actorId: actor.id, action: "order-placed", subjectType: "order", subjectId: order.id }, transaction);
-    await addJob("expireOrder", { orderId: order.id }, transaction, { runAt: holdUntil, key: `expire:${order.id}` });
+    await addJob("expireOrder", { orderId: order.id }, transaction, { runAt: holdUntil, key: expiryKey(order.id) });
     return order;
   });
 }

@@ -1,7 +1,7 @@
 import { formatMoney } from "#shared/domain/money";
 import { Order } from "../models/Order";
 import { Parcel } from "../models/Parcel";
-import { readParcels } from "../presenters/presentOrder";
+import { readParcels } from "../orders/readParcels";
 import type { Services } from "../Services";
 import type { Letter } from "./Letter";
 import { addressLines, dayInWords, lineBlocks } from "./orderParts";

@@ -4,7 +4,7 @@ import { Order } from "../models/Order";
 import type { OrderLine } from "../models/OrderLine";
 import type { Parcel } from "../models/Parcel";
 import { User } from "../models/User";
-import { readParcels } from "../presenters/presentOrder";
+import { readParcels } from "../orders/readParcels";
 import type { Services } from "../Services";
 import type { Block, Letter } from "./Letter";
 import { addressLines, dayInWords, lineBlocks } from "./orderParts";

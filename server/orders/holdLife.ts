@@ -11,3 +11,6 @@ export const pageClosesBeforeMs = 2 * minute;
 
 /** Orders of one buyer that may wait for payment at once, so that nobody holds a workshop's stock for nothing. */
 export const mostWaitingOrders = 5;
+
+/** The queue keeps one job of this key: the one that ends the hold of an order. */
+export const expiryKey = (orderId: string): string => `expire:${orderId}`;

@@ -15,6 +15,17 @@ export function stockOf(orderId: string, transaction: Transaction): Promise<Piec
   );
 }
 
+/** Pieces of each part that one buyer's unpaid orders hold. */
+export async function heldBy(buyerId: string, transaction?: Transaction): Promise<Map<string, number>> {
+  const held = await database().query<Pieces>(
+    `SELECT l.part_id AS "partId", sum(l.quantity)::integer AS quantity
+     FROM orders o JOIN parcels p ON p.order_id = o.id JOIN order_lines l ON l.parcel_id = p.id
+     WHERE o.buyer_id = $buyerId AND o.state = 'awaiting-payment' AND l.holds_stock GROUP BY l.part_id`,
+    { bind: { buyerId }, type: QueryTypes.SELECT, transaction },
+  );
+  return new Map(held.map(({ partId, quantity }) => [partId, quantity]));
+}
+
 const byId = (pieces: readonly Pieces[]) => [...pieces].sort((a, b) => (a.partId < b.partId ? -1 : 1));
 
 async function change(sql: string, pieces: readonly Pieces[], transaction: Transaction): Promise<void> {

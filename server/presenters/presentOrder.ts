@@ -1,12 +1,12 @@
-import { Op } from "sequelize";
 import { orderMayBecome } from "#shared/domain/orderState";
 import type { Order, OrderParcel, OrderSummary } from "#shared/schemas/order";
 import { totalsOf } from "../basket/priceBasket";
 import { AuditEntry } from "../models/AuditEntry";
 import type { Order as OrderRow } from "../models/Order";
-import { OrderLine } from "../models/OrderLine";
-import { Parcel } from "../models/Parcel";
-import { Workshop } from "../models/Workshop";
+import type { OrderLine } from "../models/OrderLine";
+import type { Parcel } from "../models/Parcel";
+import type { Workshop } from "../models/Workshop";
+import { readParcels } from "../orders/readParcels";
 import type { Actor } from "../policies/Actor";
 import { orderPolicy } from "../policies/orderPolicy";
 import { presentWorkshop } from "./presentWorkshop";
@@ -47,20 +47,6 @@ function presentParcel(parcel: Parcel, lines: readonly OrderLine[], workshop: Wo
     totalMinor,
     leavesBy: time(parcel.leavesBy),
   };
-}
-
-/** Parcels of some orders with their lines and workshops. */
-export async function readParcels(orderIds: readonly string[]) {
-  const parcels = await Parcel.findAll({ where: { orderId: { [Op.in]: [...orderIds] } }, ...inOrder });
-  const [lines, workshops] = await Promise.all([
-    OrderLine.findAll({ where: { parcelId: { [Op.in]: parcels.map(({ id }) => id) } }, ...inOrder }),
-    Workshop.findAll({ where: { id: { [Op.in]: parcels.map(({ workshopId }) => workshopId) } } }),
-  ]);
-  const workshopOf = new Map(workshops.map((workshop) => [workshop.id, workshop]));
-  return parcels.flatMap((parcel) => {
-    const workshop = workshopOf.get(parcel.workshopId);
-    return workshop ? [{ parcel, workshop, lines: lines.filter(({ parcelId }) => parcelId === parcel.id) }] : [];
-  });
 }
 
 async function readHistory(orderId: string): Promise<Order["history"]> {

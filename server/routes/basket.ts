@@ -10,7 +10,7 @@ const tag = "Basket";
 
 async function show(owner: BasketOwner, shipTo: string): Promise<Basket> {
   const basket = await findBasket(owner);
-  return presentBasket(basket && (await readBasket(basket.id, shipTo)), shipTo);
+  return presentBasket(basket && (await readBasket(basket.id, shipTo, { buyerId: basket.userId })), shipTo);
 }
 
 export function basketRoutes(): Endpoint[] {
@@ -40,9 +40,10 @@ export function basketRoutes(): Endpoint[] {
         answer: Basket,
       },
       async ({ req, actor, params, query, body }) => {
-        const basketId = await putBasketLine(basketOwner(req, actor), params.partId, body);
-        if (!actor) req.session.basketId = basketId;
-        return presentBasket(await readBasket(basketId, query.shipTo), query.shipTo);
+        const basket = await putBasketLine(basketOwner(req, actor), params.partId, body);
+        if (!actor) req.session.basketId = basket.id;
+        const { shipTo } = query;
+        return presentBasket(await readBasket(basket.id, shipTo, { buyerId: basket.userId }), shipTo);
       },
     ),
     endpoint(

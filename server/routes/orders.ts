@@ -9,10 +9,10 @@ import { AppError } from "../errors/AppError";
 import { type Endpoint, endpoint } from "../http/endpoint";
 import { Order as OrderRow } from "../models/Order";
 import { readOrderCursor, writeOrderCursor } from "../orders/orderCursor";
+import { orderTarget } from "../orders/orderTarget";
 import type { Actor } from "../policies/Actor";
 import { authorize } from "../policies/authorize";
 import { boughtBy, orderPolicy } from "../policies/orderPolicy";
-import { orderTarget } from "../policies/orderTarget";
 import { presentOrder, presentOrders } from "../presenters/presentOrder";
 import type { Services } from "../Services";
 

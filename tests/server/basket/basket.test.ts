@@ -129,6 +129,12 @@ describe("a visitor's basket", () => {
     await someone.put(`/basket/lines/${parts[49]!.id}`, { quantity: 2 }).expect(200);
   });
 
+  it("takes any text for what it is for", async () => {
+    const someone = await visitor(site);
+    const part = await buildPart();
+    await someone.put(`/basket/lines/${part.id}`, { quantity: 1, forNeed: "a\u0000b \ud800 '; --" }).expect(200);
+  });
+
   it("is nobody else's", async () => {
     const part = await buildPart();
     const [one, other] = [await visitor(site), await visitor(site)];

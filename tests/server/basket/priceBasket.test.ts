@@ -21,8 +21,10 @@ const terms = (given = {}) => ({
   ...given,
 });
 const one = (line: object, termsGiven = {}) =>
-  priceBasket([{ terms: terms(termsGiven), lines: [{ part: part(line), quantity: 2, forNeed: null }] }], "DE")
-    .parcels[0]!;
+  priceBasket(
+    [{ terms: terms(termsGiven), lines: [{ part: part(line), quantity: 2, forNeed: null, heldAlready: 0 }] }],
+    "DE",
+  ).parcels[0]!;
 
 describe("priceBasket", () => {
   it("adds parts and postage, and contains the tax of both", () => {
@@ -95,6 +97,7 @@ describe("priceBasket", () => {
           part: part({ id: `p${index}`, priceMinor, stockOnHand: null }),
           quantity,
           forNeed: null,
+          heldAlready: 0,
         }));
         const basket = priceBasket([{ terms: terms({ taxRateBasisPoints: rate }), lines: wanted }], "DE");
         const [parcel] = basket.parcels;

@@ -125,6 +125,26 @@ describe("placing an order", () => {
     expect(res.body.parcels[0].lines[0]).toMatchObject({ title: "As bought", unitMinor: 2000 });
   });
 
+  it("takes an address in any writing, and text that is none", async () => {
+    const part = await buildPart();
+    const { me } = await signedInBuyer(site);
+    await fill(me, [part]);
+    const res = await checkOut(me, { shippingAddress: { ...homeAddress, name: "Ærøskøbing 東京 \ud800" } });
+    expect(res.status).toBe(201);
+    const order = await me.get(`/orders/${res.body.orderId}`).expect(200);
+    expect(order.body.shippingAddress.name).toBe("Ærøskøbing 東京 \ufffd");
+  });
+
+  it("tells a buyer whose own unpaid order holds the last one", async () => {
+    const part = await buildPart({ stockOnHand: 1 });
+    const { me } = await waitingOrder(site, [part]);
+    const [line] = (await me.get("/basket").expect(200)).body.parcels[0].lines;
+    expect(line.problem).toContain("Your own unpaid order holds 1 of it");
+    const other = (await signedInBuyer(site)).me;
+    await fill(other, [part]);
+    expect((await other.get("/basket")).body.parcels[0].lines[0].problem).toContain("None is left");
+  });
+
   it("takes no stock of what is made when ordered", async () => {
     const part = await buildPart({ offerType: "made-to-order", leadDays: 10 });
     const { orderId } = await waitingOrder(site, [part], 20);

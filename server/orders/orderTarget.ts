@@ -1,7 +1,7 @@
 import type { Transaction } from "sequelize";
 import type { Order } from "../models/Order";
 import { Parcel } from "../models/Parcel";
-import type { OrderTarget } from "./orderPolicy";
+import type { OrderTarget } from "../policies/orderPolicy";
 
 /** An order as its policy sees it. */
 export async function orderTarget(order: Order, transaction?: Transaction): Promise<OrderTarget> {
