@@ -20,15 +20,19 @@ export type CandidateQuery = {
   limit: number;
 };
 
-/** One measured item that may fit: a part of its own, or the line of a kit. By words alone a part, without an item. */
-export type CandidateRef = { itemId: string | null; partId: string };
+/**
+ * Measured items that may fit: parts of their own, or lines of kits. By words alone parts, measured or not.
+ * Each once, in no order.
+ */
+export type Candidates = { itemIds: string[]; partIds: string[] };
 
 /**
- * Finds the few items worth assessing among all that are published; ranking and words are the caller's.
- * Both adapters answer the same items for the same query: one suite of tests holds them to it.
+ * Finds the few items worth assessing among all that are published. What it gives may be more than what is published or
+ * fits, never less: the caller looks everything up and assesses it, so that an index that lags behind shows nothing that
+ * was taken away. One suite of tests holds both adapters to the same search results.
  */
 export type SearchEngine = {
-  candidates(query: CandidateQuery): Promise<CandidateRef[]>;
+  candidates(query: CandidateQuery): Promise<Candidates>;
   /** Brings the index up to date with the database for these parts; a part no longer published leaves it. */
   index(partIds: readonly string[]): Promise<void>;
 };

@@ -1,14 +1,13 @@
 import { type EnqueuedTaskPromise, type Index, Meilisearch, MeilisearchError } from "meilisearch";
-import type { CandidateQuery, CandidateRef, SearchEngine } from "../adapters/SearchEngine";
+import type { CandidateQuery, Candidates, SearchEngine } from "../adapters/SearchEngine";
 import { edgeFields, type MeiliDocument, meiliDocuments } from "./meiliDocument";
 import { meiliFilter } from "./meiliFilter";
 import { select } from "./select";
-import { verifyCandidates } from "./verifyCandidates";
 import { soughtWords } from "./wordQuery";
 
 const indexName = "idlewright-items";
 const batch = 1000;
-const mostHits = 20_000;
+const mostHits = 100_000;
 
 const settings = {
   searchableAttributes: ["words"],
@@ -28,8 +27,7 @@ async function done(task: EnqueuedTaskPromise): Promise<void> {
 }
 
 /**
- * Candidates from Meilisearch, whose index the `indexParts` job keeps up. Every candidate is looked up in the database
- * before it is given on, so an index that lags behind shows nothing that was taken away.
+ * Candidates from Meilisearch, whose index the `indexParts` job keeps up.
  *
  * Where the service does not answer, `database` does, with the same answers; that is logged.
  */
@@ -51,7 +49,7 @@ export class MeilisearchEngine implements SearchEngine {
     this.#index = client.index<MeiliDocument>(indexName);
   }
 
-  async candidates(query: CandidateQuery): Promise<CandidateRef[]> {
+  async candidates(query: CandidateQuery): Promise<Candidates> {
     try {
       await this.#prepared();
       return await this.#search(query);
@@ -95,19 +93,18 @@ export class MeilisearchEngine implements SearchEngine {
     await done(this.#index.deleteDocuments({ filter: `part IN [${quoted(partIds)}]${kept}` }));
   }
 
-  async #search({ sought, words, limit }: CandidateQuery): Promise<CandidateRef[]> {
+  async #search({ sought, words, limit }: CandidateQuery): Promise<Candidates> {
     const typed = words === null ? null : soughtWords(words).join(" ");
     // Nothing to look for is everything to the service; here it is nothing.
-    if (typed === "") return [];
+    if (typed === "") return { itemIds: [], partIds: [] };
     const { hits } = await this.#index.search(typed, {
       filter: meiliFilter(sought),
       matchingStrategy: "all",
       limit: Math.min(limit, mostHits),
       attributesToRetrieve: ["item", "part"],
     });
-    return verifyCandidates(
-      sought,
-      hits.map(({ item, part }) => ({ itemId: item, partId: part })),
-    );
+    return sought.length > 0
+      ? { itemIds: hits.flatMap(({ item }) => item ?? []), partIds: [] }
+      : { itemIds: [], partIds: hits.map(({ part }) => part) };
   }
 }

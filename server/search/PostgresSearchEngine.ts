@@ -1,4 +1,4 @@
-import type { CandidateQuery, CandidateRef, SearchEngine } from "../adapters/SearchEngine";
+import type { CandidateQuery, Candidates, SearchEngine } from "../adapters/SearchEngine";
 import { candidateSql } from "./candidateSql";
 import { select } from "./select";
 import { wordQuery } from "./wordQuery";
@@ -15,11 +15,11 @@ const learnSql = `
  * Only the vocabulary that forgives typing errors has to be kept up; words that no part uses any more stay in it.
  */
 export class PostgresSearchEngine implements SearchEngine {
-  async candidates({ sought, words, limit }: CandidateQuery): Promise<CandidateRef[]> {
+  async candidates({ sought, words, limit }: CandidateQuery): Promise<Candidates> {
     const tsquery = words === null ? null : await this.#tsqueryOf(words);
     const { sql, bind } = candidateSql({ sought, tsquery, limit });
-    const rows = await select<{ item: string | null; part: string }>(sql, bind);
-    return rows.map(({ item, part }) => ({ itemId: item, partId: part }));
+    const ids = (await select<{ id: string }>(sql, bind)).map(({ id }) => id);
+    return sought.length > 0 ? { itemIds: ids, partIds: [] } : { itemIds: [], partIds: ids };
   }
 
   async index(partIds: readonly string[]): Promise<void> {

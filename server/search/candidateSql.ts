@@ -13,11 +13,6 @@ export class Statement {
   }
 }
 
-/** Items and parts that everybody may see. */
-export const publishedItems = `measured_items i
-  JOIN parts p ON p.id = i.part_id AND p.state = 'published'
-  JOIN workshops w ON w.id = p.workshop_id AND w.state = 'admitted'`;
-
 /** Whether the row `row` of measured_dimensions lies in a window. */
 export function inWindow(row: string, { lowerUm, upperUm, reach }: SizeWindow, statement: Statement): string {
   const reachName = `${statement.param(reach)}::float8`;
@@ -38,11 +33,13 @@ function indexStretch(kindName: string, window: SizeWindow, statement: Statement
       AND ceil(${statement.param(window.upperUm)}::float8 + ${reach})::integer`;
 }
 
-/** One SELECT of (item, part) for what is sought, through the window index along each of `along`. */
+const searched = (tsquery: string) => `p.search_words @@ to_tsquery('english', ${tsquery}::text)`;
+
+/** One SELECT of items for what is sought, through the window index along `along`. */
 function windowBranch(
   { kind, windows }: Sought,
   along: SizeWindow,
-  wordsCondition: string,
+  tsquery: string | null,
   statement: Statement,
 ): string {
   const kindName = statement.param(kind);
@@ -54,42 +51,44 @@ function windowBranch(
   const ruledOut = outside.length
     ? `AND NOT EXISTS (SELECT FROM measured_dimensions o WHERE o.item_id = d.item_id AND (${outside.join(" OR ")}))`
     : "";
-  return `SELECT i.id AS item, i.part_id AS part
-    FROM measured_dimensions d JOIN ${publishedItems} ON i.id = d.item_id
-    WHERE ${indexStretch(kindName, along, statement)} AND ${inWindow("d", along, statement)} ${ruledOut} ${wordsCondition}`;
+  // Only words need the part itself: what is published is looked up with the part, later, for the few that are left.
+  const joined = tsquery ? "JOIN measured_items i ON i.id = d.item_id JOIN parts p ON p.id = i.part_id" : "";
+  return `SELECT d.item_id AS id FROM measured_dimensions d ${joined}
+    WHERE ${indexStretch(kindName, along, statement)} AND ${inWindow("d", along, statement)} ${ruledOut}
+    ${tsquery ? `AND ${searched(tsquery)}` : ""}`;
 }
 
-function branchesOf(sought: Sought, wordsCondition: string, statement: Statement): string[] {
-  const { kind, windows } = sought;
+function branchesOf({ kind, windows }: Sought, tsquery: string | null, statement: Statement): string[] {
   if (windows.length === 0) {
     return [
-      `SELECT i.id AS item, i.part_id AS part FROM ${publishedItems}
-       WHERE i.kind = ${statement.param(kind)} ${wordsCondition}`,
+      `SELECT i.id FROM measured_items i JOIN parts p ON p.id = i.part_id
+       WHERE i.kind = ${statement.param(kind)} ${tsquery ? `AND ${searched(tsquery)}` : ""}`,
     ];
   }
   // Every item states its primary dimension, so where that is asked for one way through the index finds all.
   const primary = windows.find(({ dimension }) => dimension === kindFacts[kind].primary);
-  return (primary ? [primary] : windows).map((along) => windowBranch(sought, along, wordsCondition, statement));
+  const ways = primary ? [primary] : windows;
+  return ways.map((along) => windowBranch({ kind, windows }, along, tsquery, statement));
 }
 
 /**
- * The statement that finds candidates. `tsquery` is in PostgreSQL's own grammar for to_tsquery, or null for no words.
- *
- * Shape: rows {item, part}; by words alone `item` is null.
+ * The statement that finds candidates: rows {id} of items, or of published parts where words alone are searched.
+ * `tsquery` is in PostgreSQL's own grammar for to_tsquery, or null for no words.
  */
-export function candidateSql(
-  { sought, tsquery, limit }: { sought: readonly Sought[]; tsquery: string | null; limit: number },
-  statement = new Statement(),
-): { sql: string; bind: Record<string, unknown> } {
-  const words =
-    tsquery === null ? "" : `AND p.search_words @@ to_tsquery('english', ${statement.param(tsquery)}::text)`;
+export function candidateSql({
+  sought,
+  tsquery,
+  limit,
+}: {
+  sought: readonly Sought[];
+  tsquery: string | null;
+  limit: number;
+}): { sql: string; bind: Record<string, unknown> } {
+  const statement = new Statement();
+  const words = tsquery === null ? null : statement.param(tsquery);
   const branches =
     sought.length > 0
       ? sought.flatMap((one) => branchesOf(one, words, statement))
-      : [
-          `SELECT NULL::uuid AS item, p.id AS part FROM parts p
-           JOIN workshops w ON w.id = p.workshop_id AND w.state = 'admitted'
-           WHERE p.state = 'published' ${words}`,
-        ];
+      : [`SELECT p.id FROM parts p WHERE p.state = 'published' ${words ? `AND ${searched(words)}` : ""}`];
   return { sql: `${branches.join("\nUNION\n")}\nLIMIT ${statement.param(limit)}::integer`, bind: statement.bind };
 }

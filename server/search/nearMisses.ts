@@ -1,13 +1,13 @@
-import type { DimensionFit } from "#shared/domain/fit";
+import type { SizeChance } from "#shared/domain/fit";
 import type { Ranked } from "./rankCandidates";
 
 const mostNearMisses = 6;
 
 /** A candidate that one dimension alone keeps out. */
-export type Miss = { ranked: Ranked; failing: DimensionFit };
+export type Miss = { ranked: Ranked; failing: SizeChance };
 
 /** How far a size lies outside its band, in widths of the band. */
-function farOut({ deviationMm, lowerMm, upperMm }: DimensionFit, neededMm: number): number {
+function farOut({ deviationMm, lowerMm, upperMm }: SizeChance, neededMm: number): number {
   const nominalMm = neededMm + deviationMm;
   return Math.max(lowerMm - nominalMm, nominalMm - upperMm, 0) / Math.max(upperMm - lowerMm, 0.001);
 }

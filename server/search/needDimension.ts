@@ -32,10 +32,10 @@ export function contradicts({ asNewMm, standardUncertaintyMm }: NeedDimension, {
 export function measuredDimension(
   kind: PartKind,
   reading: Reading,
-  how: { instrument: Instrument; condition: Condition },
+  { instrument, condition }: { instrument: Instrument; condition: Condition },
 ): NeedDimension {
-  const { dimension, text, mm, roundedToMm, echo } = reading;
-  const { asNew, basis } = estimateAsNew({ kind, dimension, readingsMm: [mm], resolutionMm: roundedToMm, ...how });
+  const { dimension, text, mm, roundedToMm: resolutionMm, echo } = reading;
+  const { asNew, basis } = estimateAsNew({ kind, dimension, readingsMm: [mm], resolutionMm, instrument, condition });
   const band = defaultBand(kind, dimension, asNew.valueMm);
   return {
     dimension,

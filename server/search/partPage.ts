@@ -1,19 +1,20 @@
 import type { z } from "zod";
+import type { PostageRate } from "#shared/domain/postage";
 import type { FitClaim, PartPage } from "#shared/schemas/catalogue";
 import type { NeedQuery } from "#shared/schemas/need";
 import { AppError } from "../errors/AppError";
+import { MeasuredItem } from "../models/MeasuredItem";
 import { Part } from "../models/Part";
 import { Photo } from "../models/Photo";
 import { Workshop } from "../models/Workshop";
 import { presentFit } from "../presenters/presentFit";
 import { presentParts, presentPhoto } from "../presenters/presentParts";
 import { presentTrader, presentWorkshop } from "../presenters/presentWorkshop";
-import { type Assessed, assessRow, compareFits } from "./assessRow";
+import { assessRow, compareFits, explainFit } from "./assessRow";
 import { evidenceOf } from "./evidenceOf";
-import { loadItems } from "./loadRows";
+import { landedOf, loadSizes } from "./loadRows";
 import { readNeed } from "./readNeed";
 import { select } from "./select";
-import { landedOf, loadSellers } from "./sellers";
 import { dimensionsIn } from "./Target";
 
 const claimsSql = `
@@ -31,13 +32,33 @@ async function shownPart(partId: string): Promise<{ part: Part; workshop: Worksh
 }
 
 /** How a part, or the best line of a kit, fits what is asked for; null where nothing of it can be checked. */
-async function bestFit(partId: string, query: NeedQuery, kind: Part["kind"]) {
-  const read = await readNeed({ ...query, kind: query.kind ?? (kind === "rebuild-kit" ? undefined : kind) });
-  const rows = read.targets.length > 0 ? await loadItems("part", [partId], dimensionsIn(read.targets)) : [];
-  const fits = rows.flatMap((row) => assessRow(row, read.targets) ?? []);
-  const best: Assessed | undefined = fits.sort((a, b) => compareFits(a.fit, b.fit))[0];
+async function bestFit(part: Part, query: NeedQuery) {
+  const kind = query.kind ?? (part.kind === "rebuild-kit" ? undefined : part.kind);
+  const read = await readNeed({ ...query, kind });
+  const items = read.targets.length > 0 ? await MeasuredItem.findAll({ where: { partId: part.id } }) : [];
+  const sizes = await loadSizes(
+    items.map(({ id }) => id),
+    dimensionsIn(read.targets),
+  );
+  const fits = items.flatMap(({ id, kind }) => {
+    const row = { kind, sizes: sizes.get(id) ?? {} };
+    const assessed = assessRow(row, read.targets);
+    return assessed ? [{ row, ...assessed }] : [];
+  });
+  const best = fits.sort((a, b) => compareFits(a.fit, b.fit))[0];
   const severalPoints = new Set(read.targets.map(({ point }) => point?.id)).size > 1;
-  return { ...read, fit: best ? presentFit(best.fit, severalPoints ? (best.target.point?.name ?? null) : null) : null };
+  const pointName = severalPoints ? (best?.target.point?.name ?? null) : null;
+  return { ...read, fit: best ? presentFit(explainFit(best.row, best.target), pointName) : null };
+}
+
+const postageSql = `
+  SELECT r.base_minor AS "baseMinor", r.per_item_minor AS "perItemMinor", r.free_over_minor AS "freeOverMinor"
+  FROM shipping_countries c JOIN shipping_rates r ON r.id = c.rate_id AND r.currency = $currency
+  WHERE c.workshop_id = $workshopId::uuid AND c.country = $shipTo`;
+
+async function landedIn({ priceMinor, currency, workshopId }: Part, shipTo: string) {
+  const [rate] = await select<PostageRate>(postageSql, { workshopId, shipTo, currency });
+  return landedOf(priceMinor, rate ?? { baseMinor: null, perItemMinor: 0, freeOverMinor: null });
 }
 
 /**
@@ -47,18 +68,17 @@ async function bestFit(partId: string, query: NeedQuery, kind: Part["kind"]) {
  */
 export async function partPage(partId: string, query: NeedQuery): Promise<z.input<typeof PartPage>> {
   const { part, workshop } = await shownPart(partId);
-  const { need, fit, familyId } = await bestFit(partId, query, part.kind);
-  const [parts, photos, fitClaims, evidence, sellers] = await Promise.all([
+  const { need, fit, familyId } = await bestFit(part, query);
+  const [parts, photos, fitClaims, evidence, landed] = await Promise.all([
     presentParts([partId]),
     Photo.findAll({ where: { partId }, order: [["position", "ASC"]] }),
     select<FitClaim>(claimsSql, { partId }),
     evidenceOf([partId], familyId),
-    loadSellers([workshop.id], query.shipTo),
+    landedIn(part, query.shipTo),
   ]);
   const summary = parts.get(partId);
   const reports = evidence.get(partId);
-  const seller = sellers.get(workshop.id);
-  if (!summary || !reports || !seller) throw new AppError("not-found");
+  if (!summary || !reports) throw new AppError("not-found");
   return {
     part: part.state === "retired" ? { ...summary, available: 0 } : summary,
     description: part.description,
@@ -69,7 +89,7 @@ export async function partPage(partId: string, query: NeedQuery): Promise<z.inpu
     evidence: reports,
     need,
     fit,
-    ...landedOf(part, seller),
+    ...landed,
     currency: part.currency,
     madeToSize: part.madeToSize,
   };

@@ -2,16 +2,10 @@ import { verdictThresholds } from "#shared/domain/verdict";
 import type { SearchQuery } from "#shared/schemas/search";
 import { type Assessed, assessRow, compareFits } from "./assessRow";
 import type { CandidateRow } from "./loadRows";
-import { type Landed, landedOf, type Seller } from "./sellers";
 import type { Target } from "./Target";
 
-/** A candidate with everything that it is ranked by. `assessed` is null where words alone found it. */
-export type Ranked = Landed & {
-  row: CandidateRow;
-  seller: Seller;
-  assessed: Assessed | null;
-  dispatchDays: number;
-};
+/** A candidate and how it fits; `assessed` is null where words alone found it. */
+export type Ranked = { row: CandidateRow; assessed: Assessed | null };
 type Filters = Pick<SearchQuery, "minChance" | "offer" | "material" | "sort">;
 
 /** Where a candidate stands under a sort: compared item by item, the smaller first; ends with the part's id. */
@@ -22,10 +16,10 @@ const notShipped = Number.MAX_SAFE_INTEGER;
 const hundredths = (chance: number) => Math.round(chance * 100);
 
 /** The key of a candidate under a sort. Chances that are the same to two digits count as equal. */
-export function sortKey({ row, assessed, landedMinor, dispatchDays }: Ranked, sort: SearchQuery["sort"]): SortKey {
-  const landed = landedMinor ?? notShipped;
+export function sortKey({ row, assessed }: Ranked, sort: SearchQuery["sort"]): SortKey {
+  const landed = row.landedMinor ?? notShipped;
   if (sort === "price") return [landed, row.partId];
-  if (sort === "dispatch") return [dispatchDays, landed, row.partId];
+  if (sort === "dispatch") return [row.dispatchDays, landed, row.partId];
   const fit = assessed?.fit;
   return [fit ? -hundredths(fit.chance) : 0, fit ? -fit.coverage : 0, landed, row.partId];
 }
@@ -60,18 +54,17 @@ export const leastChance = ({ minChance }: Pick<SearchQuery, "minChance">) => mi
  */
 export function rankCandidates(
   rows: readonly CandidateRow[],
-  { targets, sellers, filters }: { targets: readonly Target[]; sellers: ReadonlyMap<string, Seller>; filters: Filters },
+  targets: readonly Target[],
+  { offer, material, sort, minChance }: Filters,
 ): { fitting: Ranked[]; missing: Ranked[] } {
-  const { offer, material, sort } = filters;
-  const candidates = rows.flatMap((row): Ranked[] => {
-    const seller = sellers.get(row.workshopId);
-    if (!seller || (offer && row.offerType !== offer) || (material && row.material !== material)) return [];
+  const candidates: Ranked[] = [];
+  for (const row of rows) {
+    if ((offer && row.offerType !== offer) || (material && row.material !== material)) continue;
     const assessed = targets.length > 0 ? assessRow(row, targets) : null;
-    if (targets.length > 0 && !assessed) return [];
-    return [{ row, seller, assessed, dispatchDays: seller.dispatchDays + row.leadDays, ...landedOf(row, seller) }];
-  });
+    if (assessed || targets.length === 0) candidates.push({ row, assessed });
+  }
 
-  const least = leastChance(filters);
+  const least = leastChance({ minChance });
   const reaches = ({ assessed }: Ranked) => !assessed || assessed.fit.chance >= least;
   const parts = onePerPart(candidates);
   const keyed = parts.filter(reaches).map((ranked) => ({ ranked, key: sortKey(ranked, sort) }));

@@ -1,5 +1,5 @@
 import { kindFacts } from "#shared/domain/partKinds";
-import type { SearchAnswer, SearchQuery } from "#shared/schemas/search";
+import type { SearchAnswer, SearchItem, SearchQuery } from "#shared/schemas/search";
 import type { CandidateQuery, SearchEngine, Sought } from "../adapters/SearchEngine";
 import { presentParts } from "../presenters/presentParts";
 import { presentSearchItem } from "../presenters/presentSearchItem";
@@ -12,12 +12,12 @@ import { refused } from "./readLengths";
 import { type ReadNeed, readNeed } from "./readNeed";
 import { countUpTo, readCursor, writeCursor } from "./searchCursor";
 import { railSizeOf, searchRail } from "./searchRail";
-import { loadSellers } from "./sellers";
 import { soughtBy } from "./sizeWindows";
 import { dimensionsIn } from "./Target";
+import { workshopSummaries } from "./workshopSummaries";
 
 /** More than any search that narrows anything down; keeps one request from taking the server's memory. */
-const mostCandidates = 20_000;
+const mostCandidates = 100_000;
 
 /** What the engine is asked. Errors: `invalid-request` where nothing narrows the search down. */
 function soughtOf({ need, targets, kinds }: ReadNeed, least: number): readonly Sought[] {
@@ -35,25 +35,47 @@ function soughtOf({ need, targets, kinds }: ReadNeed, least: number): readonly S
 
 async function loadCandidates(
   engine: SearchEngine,
-  read: ReadNeed,
+  { need, targets }: ReadNeed,
   query: SearchQuery,
   sought: CandidateQuery["sought"],
 ): Promise<CandidateRow[]> {
-  const words = read.need.q;
-  const along = railSizeOf(read.need);
+  const { shipTo, offer, material } = query;
+  const words = need.q;
+  const along = railSizeOf(need);
   const shown = sought[0];
-  const [refs, neighbours] = await Promise.all([
+  const [{ itemIds, partIds }, neighbours] = await Promise.all([
     engine.candidates({ sought, words, limit: mostCandidates }),
-    along && shown && shown.windows.length > 0
-      ? neighboursOf(shown, along.dimension, { offer: query.offer, material: query.material, words })
-      : [],
+    along && shown ? neighboursOf(shown, along.dimension, { offer, material, words }) : [],
   ]);
-  const itemIds = new Set([...refs.flatMap(({ itemId }) => itemId ?? []), ...neighbours]);
   const [items, parts] = await Promise.all([
-    loadItems("item", [...itemIds], dimensionsIn(read.targets)),
-    loadParts(refs.flatMap(({ itemId, partId }) => (itemId ? [] : partId))),
+    loadItems([...new Set([...itemIds, ...neighbours])], { dimensions: dimensionsIn(targets), shipTo }),
+    loadParts(partIds, shipTo),
   ]);
   return [...items, ...parts];
+}
+
+/** Rows of results for these candidates, by the id of the part. */
+async function presentAll(
+  ranked: readonly Ranked[],
+  { targets, familyId }: ReadNeed,
+): Promise<Map<string, SearchItem>> {
+  const partIds = ranked.map(({ row }) => row.partId);
+  const [parts, reports, workshops] = await Promise.all([
+    presentParts(partIds),
+    evidenceOf(partIds, familyId),
+    workshopSummaries(ranked.map(({ row }) => row.workshopId)),
+  ]);
+  const severalPoints = new Set(targets.map(({ point }) => point?.id)).size > 1;
+  const items = new Map<string, SearchItem>();
+  for (const one of ranked) {
+    const part = parts.get(one.row.partId);
+    const evidence = reports.get(one.row.partId);
+    const workshop = workshops.get(one.row.workshopId);
+    // A part that was taken away between two of the queries is left out.
+    if (!part || !evidence || !workshop) continue;
+    items.set(part.id, presentSearchItem(one, { part, workshop, evidence, severalPoints }));
+  }
+  return items;
 }
 
 /**
@@ -64,38 +86,29 @@ async function loadCandidates(
 export async function searchParts(engine: SearchEngine, query: SearchQuery): Promise<SearchAnswer> {
   const after = query.cursor === undefined ? null : readCursor(query.cursor, query.sort);
   const read = await readNeed(query, query.q || null);
-  const { need, targets, familyId } = read;
+  const { need, targets } = read;
   const least = leastChance(query);
   const rows = await loadCandidates(engine, read, query, soughtOf(read, least));
-  const sellers = await loadSellers(
-    rows.map(({ workshopId }) => workshopId),
-    query.shipTo,
-  );
-  const { fitting, missing } = rankCandidates(rows, { targets, sellers, filters: query });
+  const { fitting, missing } = rankCandidates(rows, targets, query);
 
-  const keys = after ? fitting.map((ranked) => sortKey(ranked, query.sort)) : [];
-  const start = after ? countUpTo(keys, after) : 0;
+  const keyOf = (ranked: Ranked) => sortKey(ranked, query.sort);
+  const start = after ? countUpTo(fitting.map(keyOf), after) : 0;
   const page = fitting.slice(start, start + query.limit);
   const last = start + page.length < fitting.length ? page.at(-1) : undefined;
   const misses = nearMissesOf(missing, least);
-
-  const partIds = [...page, ...misses.map(({ ranked }) => ranked)].map(({ row }) => row.partId);
-  const [parts, evidence] = await Promise.all([presentParts(partIds), evidenceOf(partIds, familyId)]);
-  const severalPoints = new Set(targets.map(({ point }) => point?.id)).size > 1;
-  const present = (ranked: Ranked) => {
-    const part = parts.get(ranked.row.partId);
-    const reports = evidence.get(ranked.row.partId);
-    // A part that was taken away between two of the queries is left out.
-    return part && reports ? [presentSearchItem(ranked, { part, evidence: reports, severalPoints })] : [];
-  };
+  const presented = await presentAll([...page, ...misses.map(({ ranked }) => ranked)], read);
+  const itemOf = ({ row }: Ranked) => presented.get(row.partId) ?? [];
   return {
     need,
-    items: page.flatMap(present),
+    items: page.flatMap(itemOf),
     rail: searchRail(need, fitting, missing),
-    nearMisses: misses.flatMap(({ ranked, failing: { dimension, reason } }) =>
-      present(ranked).map((item) => ({ ...item, failing: { dimension, reason } })),
+    nearMisses: misses.flatMap(({ ranked, failing: { dimension } }) =>
+      [itemOf(ranked)].flat().map((item) => {
+        const reason = item.fit?.dimensions.find((size) => size.dimension === dimension)?.reason ?? "";
+        return { ...item, failing: { dimension, reason } };
+      }),
     ),
     total: fitting.length,
-    nextCursor: last ? writeCursor(query.sort, sortKey(last, query.sort)) : null,
+    nextCursor: last ? writeCursor(query.sort, keyOf(last)) : null,
   };
 }

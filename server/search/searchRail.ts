@@ -1,4 +1,5 @@
 import { kindFacts } from "#shared/domain/partKinds";
+import { verdictOf } from "#shared/domain/verdict";
 import type { Need, NeedDimension } from "#shared/schemas/need";
 import type { Rail, RailTick } from "#shared/schemas/search";
 import type { Ranked } from "./rankCandidates";
@@ -22,7 +23,7 @@ function tickOf({ row, assessed }: Ranked, { kind }: Need, { dimension }: NeedDi
     title: row.title,
     nominalMm: nominalUm / 1000,
     plusMinusMm: halfWidthUm / 1000,
-    verdict: assessed.fit.verdict,
+    verdict: verdictOf(assessed.fit.chance),
   };
 }
 

@@ -8,7 +8,7 @@ import { select } from "./select";
 import { soughtBy } from "./sizeWindows";
 import { dimensionsIn } from "./Target";
 
-const mostCandidates = 20_000;
+const mostCandidates = 100_000;
 
 const claimedSql = `
   SELECT c.service_point_id AS point, c.part_id AS part
@@ -24,13 +24,10 @@ export async function servicePointCounts(engine: SearchEngine, family: FamilyReg
   const sought = targets.map((target) => soughtBy(target, verdictThresholds.chancy));
   const [claimed, candidates] = await Promise.all([
     select<{ point: string; part: string }>(claimedSql, { points: family.points.map(({ id }) => id) }),
-    sought.length > 0 ? engine.candidates({ sought, words: null, limit: mostCandidates }) : [],
+    sought.length > 0 ? engine.candidates({ sought, words: null, limit: mostCandidates }) : null,
   ]);
-  const rows = await loadItems(
-    "item",
-    candidates.flatMap(({ itemId }) => itemId ?? []),
-    dimensionsIn(targets),
-  );
+  // Postage plays no part in counting.
+  const rows = await loadItems(candidates?.itemIds ?? [], { dimensions: dimensionsIn(targets), shipTo: "" });
   const parts = new Map(family.points.map(({ id }) => [id, new Set<string>()]));
   for (const { point, part } of claimed) parts.get(point)?.add(part);
   for (const target of targets) {
