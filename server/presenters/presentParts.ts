@@ -1,109 +1,77 @@
-import { Op } from "sequelize";
 import { dimensionsOf, type PartKind } from "#shared/domain/partKinds";
-import type { KitLine, PartSummary, Photo, StatedDimensions } from "#shared/schemas/part";
+import type { KitLine, PartSummary, Photo, StatedDimension, StatedDimensions } from "#shared/schemas/part";
 import { photoUrl } from "../adapters/PhotoStore";
-import { KitLine as KitLineRow } from "../models/KitLine";
-import { MeasuredDimension } from "../models/MeasuredDimension";
-import { MeasuredItem } from "../models/MeasuredItem";
-import { Part } from "../models/Part";
-import { Photo as PhotoRow } from "../models/Photo";
-import { ServicePoint } from "../models/ServicePoint";
-import { Workshop } from "../models/Workshop";
+import { select } from "../db/select";
 
-const mm = (um: number) => um / 1000;
+type PhotoFacts = { file: string; alt: string; width: number; height: number };
+type Sizes = Record<
+  string,
+  [nominalUm: number, halfWidthUm: number, StatedDimension["tolerance"], StatedDimension["toleranceClass"]]
+>;
+type LineRow = Omit<KitLine, "dimensions"> & { sizes: Sizes | null };
+type Row = Omit<PartSummary, "dimensions" | "kitLines" | "photo"> & {
+  sizes: Sizes | null;
+  lines: LineRow[] | null;
+  photo: PhotoFacts | null;
+};
 
-function groupBy<Row, Key>(rows: readonly Row[], keyOf: (row: Row) => Key): Map<Key, Row[]> {
-  const groups = new Map<Key, Row[]>();
-  for (const row of rows) {
-    const group = groups.get(keyOf(row));
-    if (group) group.push(row);
-    else groups.set(keyOf(row), [row]);
-  }
-  return groups;
-}
+const sizesWhere = (condition: string) => `
+  (SELECT json_object_agg(m.dimension, json_build_array(m.nominal_um, m.half_width_um, m.tolerance, m.tolerance_class))
+   FROM measured_items i JOIN measured_dimensions m ON m.item_id = i.id WHERE ${condition})`;
 
-/** Sizes in the canonical order of their kind. */
-function presentDimensions(kind: PartKind, rows: readonly MeasuredDimension[]): StatedDimensions {
-  const byName = new Map(rows.map((row) => [row.dimension, row]));
-  const sizes: StatedDimensions = {};
+const sql = `
+  SELECT p.id, p.kind, p.title, p.offer_type AS "offerType", p.material, p.hardness_shore_a AS "hardnessShoreA",
+    p.price_minor AS "priceMinor", p.currency, p.stock_on_hand - p.stock_reserved AS available,
+    w.dispatch_days + p.lead_days AS "dispatchDays",
+    ${sizesWhere("i.part_id = p.id AND i.kit_line_id IS NULL")} AS sizes,
+    CASE WHEN p.kind = 'rebuild-kit' THEN (
+      SELECT json_agg(json_build_object('id', l.id, 'kind', l.kind, 'title', l.title, 'quantity', l.quantity,
+        'servicePointName', s.name, 'sizes', ${sizesWhere("i.kit_line_id = l.id")}) ORDER BY l.position)
+      FROM kit_lines l LEFT JOIN service_points s ON s.id = l.service_point_id WHERE l.part_id = p.id
+    ) END AS lines,
+    (SELECT json_build_object('file', f.file, 'alt', f.alt, 'width', f.width, 'height', f.height)
+     FROM photos f WHERE f.part_id = p.id AND f.position = 1) AS photo
+  FROM parts p JOIN workshops w ON w.id = p.workshop_id WHERE p.id = ANY($ids::uuid[])`;
+
+/** Sizes in mm, in the canonical order of their kind. */
+function presentDimensions(kind: PartKind, sizes: Sizes): StatedDimensions {
+  const dimensions: StatedDimensions = {};
   for (const name of dimensionsOf(kind)) {
-    const row = byName.get(name);
-    if (!row) continue;
-    sizes[name] = {
-      nominalMm: mm(row.nominalUm),
-      plusMinusMm: mm(row.halfWidthUm),
-      tolerance: row.tolerance,
-      toleranceClass: row.toleranceClass,
-    };
+    const size = sizes[name];
+    if (!size) continue;
+    const [nominalUm, halfWidthUm, tolerance, toleranceClass] = size;
+    dimensions[name] = { nominalMm: nominalUm / 1000, plusMinusMm: halfWidthUm / 1000, tolerance, toleranceClass };
   }
-  return sizes;
+  return dimensions;
 }
 
-export const presentPhoto = (row: PhotoRow, width: 320 | 960): Photo => ({
-  url: photoUrl(row.file, width),
-  alt: row.alt,
-  width,
-  height: Math.round((row.height * width) / row.width),
+export const presentPhoto = ({ file, alt, width, height }: PhotoFacts, wanted: 320 | 960): Photo => ({
+  url: photoUrl(file, wanted),
+  alt,
+  width: wanted,
+  height: Math.round((height * wanted) / width),
 });
 
-/** Pieces that can still be bought; null where the part is made when ordered. */
-export const availableOf = (part: Part): number | null =>
-  part.stockOnHand === null ? null : part.stockOnHand - part.stockReserved;
+const presentLine = ({ sizes, ...line }: LineRow): KitLine => ({
+  ...line,
+  dimensions: line.kind ? presentDimensions(line.kind, sizes ?? {}) : {},
+});
+
+function presentPart({ sizes, lines, photo, ...part }: Row): PartSummary {
+  return {
+    ...part,
+    dimensions: part.kind === "rebuild-kit" ? {} : presentDimensions(part.kind, sizes ?? {}),
+    kitLines: (lines ?? []).map(presentLine),
+    photo: photo && presentPhoto(photo, 320),
+  };
+}
 
 /**
- * Parts as they stand in a row, by id, in five queries however many there are. Ids with nothing behind them are absent.
+ * Parts as they stand in a row, by id, in one query however many there are. Ids with nothing behind them are absent.
+ * `available` is what can still be bought; null where the part is made when ordered.
  */
 export async function presentParts(ids: readonly string[]): Promise<Map<string, PartSummary>> {
-  const wanted = { [Op.in]: [...new Set(ids)] };
-  const [parts, items, lines, photos] = await Promise.all([
-    Part.findAll({ where: { id: wanted } }),
-    MeasuredItem.findAll({ where: { partId: wanted } }),
-    KitLineRow.findAll({ where: { partId: wanted }, order: [["position", "ASC"]] }),
-    PhotoRow.findAll({ where: { partId: wanted, position: 1 } }),
-  ]);
-  const [dimensions, points, workshops] = await Promise.all([
-    MeasuredDimension.findAll({ where: { itemId: { [Op.in]: items.map(({ id }) => id) } } }),
-    ServicePoint.findAll({ where: { id: { [Op.in]: lines.flatMap(({ servicePointId }) => servicePointId ?? []) } } }),
-    Workshop.findAll({ where: { id: { [Op.in]: [...new Set(parts.map(({ workshopId }) => workshopId))] } } }),
-  ]);
-
-  const dimensionsByItem = groupBy(dimensions, ({ itemId }) => itemId);
-  const sizesOf = (item: MeasuredItem | undefined) =>
-    item ? presentDimensions(item.kind, dimensionsByItem.get(item.id) ?? []) : {};
-  const itemOfPart = new Map(items.filter(({ kitLineId }) => !kitLineId).map((item) => [item.partId, item]));
-  const itemOfLine = new Map(items.map((item) => [item.kitLineId, item]));
-  const linesOfPart = groupBy(lines, ({ partId }) => partId);
-  const pointName = new Map(points.map(({ id, name }) => [id, name]));
-  const photoOf = new Map(photos.map((photo) => [photo.partId, presentPhoto(photo, 320)]));
-  const dispatchOf = new Map(workshops.map(({ id, dispatchDays }) => [id, dispatchDays]));
-
-  const presentLine = (line: KitLineRow): KitLine => ({
-    id: line.id,
-    kind: line.kind,
-    title: line.title,
-    quantity: line.quantity,
-    dimensions: sizesOf(itemOfLine.get(line.id)),
-    servicePointName: line.servicePointId ? (pointName.get(line.servicePointId) ?? null) : null,
-  });
-
-  return new Map(
-    parts.map((part) => [
-      part.id,
-      {
-        id: part.id,
-        kind: part.kind,
-        title: part.title,
-        offerType: part.offerType,
-        material: part.material,
-        hardnessShoreA: part.hardnessShoreA,
-        priceMinor: part.priceMinor,
-        currency: part.currency,
-        available: availableOf(part),
-        dispatchDays: (dispatchOf.get(part.workshopId) ?? 0) + part.leadDays,
-        dimensions: sizesOf(itemOfPart.get(part.id)),
-        kitLines: (linesOfPart.get(part.id) ?? []).map(presentLine),
-        photo: photoOf.get(part.id) ?? null,
-      },
-    ]),
-  );
+  if (ids.length === 0) return new Map();
+  const rows = await select<Row>(sql, { ids: [...new Set(ids)] });
+  return new Map(rows.map((row) => [row.id, presentPart(row)]));
 }

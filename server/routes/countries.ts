@@ -1,7 +1,7 @@
 import { countryName } from "#shared/domain/countries";
 import { CountryList } from "#shared/schemas/catalogue";
+import { select } from "../db/select";
 import { type Endpoint, endpoint } from "../http/endpoint";
-import { select } from "../search/select";
 
 const sql = `
   SELECT DISTINCT c.country AS code

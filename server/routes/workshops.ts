@@ -3,6 +3,7 @@ import { type ListingKind, listingKinds } from "#shared/domain/partKinds";
 import { WorkshopList, WorkshopPage } from "#shared/schemas/catalogue";
 import { SlugParams } from "#shared/schemas/common";
 import type { WorkshopSummary } from "#shared/schemas/part";
+import { select } from "../db/select";
 import { AppError } from "../errors/AppError";
 import { type Endpoint, endpoint } from "../http/endpoint";
 import { Part } from "../models/Part";
@@ -12,7 +13,6 @@ import { TaxRegistration } from "../models/TaxRegistration";
 import { Workshop } from "../models/Workshop";
 import { presentParts } from "../presenters/presentParts";
 import { presentWorkshopPage } from "../presenters/presentWorkshopPage";
-import { select } from "../search/select";
 
 const tag = "Catalogue";
 const partsShown = 60;

@@ -1,8 +1,8 @@
 import { type EnqueuedTaskPromise, type Index, Meilisearch, MeilisearchError } from "meilisearch";
 import type { CandidateQuery, Candidates, SearchEngine } from "../adapters/SearchEngine";
+import { select } from "../db/select";
 import { edgeFields, type MeiliDocument, meiliDocuments } from "./meiliDocument";
 import { meiliFilter } from "./meiliFilter";
-import { select } from "./select";
 import { soughtWords } from "./wordQuery";
 
 const indexName = "idlewright-items";

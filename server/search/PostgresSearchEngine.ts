@@ -1,6 +1,6 @@
 import type { CandidateQuery, Candidates, SearchEngine } from "../adapters/SearchEngine";
+import { select } from "../db/select";
 import { candidateSql } from "./candidateSql";
-import { select } from "./select";
 import { wordQuery } from "./wordQuery";
 
 const learnSql = `

@@ -1,5 +1,5 @@
 import type { Evidence } from "#shared/schemas/part";
-import { select } from "./select";
+import { select } from "../db/select";
 
 type Row = {
   partId: string;

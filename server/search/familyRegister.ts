@@ -1,6 +1,6 @@
 import type { DimensionName, PartKind } from "#shared/domain/partKinds";
+import { select } from "../db/select";
 import { AppError } from "../errors/AppError";
-import { select } from "./select";
 
 /** What the register knows of a size at a service point, in mm. */
 export type RegisterSize = { nominalMm: number; lowerMm: number; upperMm: number };

@@ -1,7 +1,7 @@
 import type { DimensionName, PartKind } from "#shared/domain/partKinds";
 import { type PostageRate, postageOf } from "#shared/domain/postage";
 import type { Material, OfferType } from "#shared/schemas/part";
-import { select } from "./select";
+import { select } from "../db/select";
 
 /** Price of one piece and its postage in minor units; null where the workshop does not ship there in this currency. */
 export type Landed = { landedMinor: number | null; shippingMinor: number | null };
@@ -48,7 +48,10 @@ const sizesById = `SELECT item_id AS "itemId", dimension, nominal_um AS "nominal
   FROM measured_dimensions WHERE item_id = ANY($ids::uuid[]) AND dimension = ANY($dimensions::text[])`;
 
 /** What one piece costs at the door: price and postage, where the workshop ships there in the part's currency. */
-export function landedOf(priceMinor: number, rate: Omit<PostageRate, "baseMinor"> & { baseMinor: number | null }): Landed {
+export function landedOf(
+  priceMinor: number,
+  rate: Omit<PostageRate, "baseMinor"> & { baseMinor: number | null },
+): Landed {
   const { baseMinor } = rate;
   if (baseMinor === null) return { landedMinor: null, shippingMinor: null };
   const shippingMinor = postageOf({ ...rate, baseMinor }, { pieces: 1, partsMinor: priceMinor });

@@ -1,5 +1,5 @@
 import { type DimensionName, dimensionNames, type PartKind } from "#shared/domain/partKinds";
-import { select } from "./select";
+import { select } from "../db/select";
 
 /** What edges are kept for: a search that reaches no further than this over a tolerance can be told by them. */
 export const edgeReach = 2;

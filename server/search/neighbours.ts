@@ -1,8 +1,8 @@
 import type { DimensionName } from "#shared/domain/partKinds";
 import type { SearchQuery } from "#shared/schemas/search";
 import type { SizeWindow, Sought } from "../adapters/SearchEngine";
+import { select } from "../db/select";
 import { inWindow, Statement } from "./candidateSql";
-import { select } from "./select";
 import { wordQuery } from "./wordQuery";
 
 /** Items looked at on each side and for each dimension: twice what is shown, since some turn out not to be on offer. */
@@ -28,9 +28,7 @@ function beyond(side: "below" | "above", asked: Asked, statement: Statement): st
     : "";
   const reach = widths * widthOf(along);
   const [from, to, order] =
-    side === "below"
-      ? [along.lowerUm - reach, along.lowerUm, "DESC"]
-      : [along.upperUm, along.upperUm + reach, "ASC"];
+    side === "below" ? [along.lowerUm - reach, along.lowerUm, "DESC"] : [along.upperUm, along.upperUm + reach, "ASC"];
   return `(SELECT d.item_id AS id FROM measured_dimensions d ${joined}
     WHERE d.kind = ${statement.param(sought.kind)} AND d.dimension = ${statement.param(along.dimension)}
       AND d.nominal_um BETWEEN ${statement.param(from)}::integer AND ${statement.param(to)}::integer

@@ -2,6 +2,7 @@ import type { z } from "zod";
 import type { PostageRate } from "#shared/domain/postage";
 import type { FitClaim, PartPage } from "#shared/schemas/catalogue";
 import type { NeedQuery } from "#shared/schemas/need";
+import { select } from "../db/select";
 import { AppError } from "../errors/AppError";
 import { MeasuredItem } from "../models/MeasuredItem";
 import { Part } from "../models/Part";
@@ -14,7 +15,6 @@ import { assessRow, compareFits, explainFit } from "./assessRow";
 import { evidenceOf } from "./evidenceOf";
 import { landedOf, loadSizes } from "./loadRows";
 import { readNeed } from "./readNeed";
-import { select } from "./select";
 import { dimensionsIn } from "./Target";
 
 const claimsSql = `

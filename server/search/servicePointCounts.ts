@@ -1,10 +1,10 @@
 import { verdictThresholds } from "#shared/domain/verdict";
 import type { SearchEngine } from "../adapters/SearchEngine";
+import { select } from "../db/select";
 import { assessRow } from "./assessRow";
 import type { FamilyRegister } from "./familyRegister";
 import { targetAt } from "./familyTargets";
 import { loadItems } from "./loadRows";
-import { select } from "./select";
 import { soughtBy } from "./sizeWindows";
 import { dimensionsIn } from "./Target";
 

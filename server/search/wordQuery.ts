@@ -1,6 +1,6 @@
+import { select } from "../db/select";
 import { forgivenSlips, mayStandFor } from "./editDistance";
 import { plainWords } from "./plainWords";
-import { select } from "./select";
 
 const mostWords = 10;
 /** Words that say nothing about a part. */

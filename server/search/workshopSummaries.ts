@@ -1,6 +1,6 @@
 import { countryName } from "#shared/domain/countries";
 import type { WorkshopSummary } from "#shared/schemas/part";
-import { select } from "./select";
+import { select } from "../db/select";
 
 const sql = "SELECT id, slug, name, town, country FROM workshops WHERE id = ANY($ids::uuid[])";
 
