@@ -55,6 +55,7 @@ async function signIn(page: Page, email: string): Promise<void> {
 /** Measures a glazed wheel in the strip, in a fraction of an inch, and searches. */
 async function search(page: Page): Promise<void> {
   await page.goto(`${siteUrl}/`);
+  await page.getByLabel("outside diameter").waitFor();
   await page.keyboard.press("/");
   await page.keyboard.type("1-47/64 in");
   await page.getByText("= 44.05 mm").first().waitFor();
@@ -68,6 +69,10 @@ async function search(page: Page): Promise<void> {
 
 /** Puts the first part of each of two workshops in the basket, and gives what they are. */
 async function putTwoInBasket(page: Page): Promise<string[]> {
+  await page
+    .getByRole("button", { name: /^Put in basket/ })
+    .first()
+    .waitFor();
   const seen = new Set<string>();
   const taken: string[] = [];
   for (const row of await page
@@ -118,6 +123,7 @@ async function buys(page: Page, email: string, complaints: string[], axe: boolea
   await page.waitForURL(/estimateMm=44\.2/);
   expect(Number(await page.getByRole("slider").getAttribute("aria-valuenow"))).toBeCloseTo(Number(before) + 0.05, 5);
   await page.goBack();
+  await page.waitForURL((url) => !url.searchParams.has("estimateMm"));
 
   const taken = await putTwoInBasket(page);
   const stockBefore = await stockOf(taken);
