@@ -31,6 +31,7 @@ export function FamilyPage() {
   const isUnknown = family.error instanceof ApiProblem && family.error.status === 404;
   return (
     <div className="page py-12">
+      <h1 className="sr-only">Mechanism family</h1>
       {isUnknown ? (
         <Notice title="No family is known under this address" />
       ) : (

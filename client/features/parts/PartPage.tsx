@@ -60,6 +60,7 @@ export function PartPage() {
     const isGone = page.error instanceof ApiProblem && page.error.status === 404;
     return (
       <div className="page py-12">
+        <h1 className="sr-only">Part</h1>
         {isGone ? (
           <Notice title="This part is not offered any more">
             <p>

@@ -32,6 +32,7 @@ export function WorkshopPage() {
   const isUnknown = workshop.error instanceof ApiProblem && workshop.error.status === 404;
   return (
     <div className="page py-12">
+      <h1 className="sr-only">Workshop</h1>
       {isUnknown ? (
         <Notice title="No workshop is known under this address" />
       ) : (
