@@ -78,6 +78,14 @@ async function presentAll(
   return items;
 }
 
+/** Everything that a search finds, before a page of it is shown. */
+export async function rankedParts(engine: SearchEngine, query: SearchQuery) {
+  const read = await readNeed(query, query.q || null);
+  const least = leastChance(query);
+  const rows = await loadCandidates(engine, read, query, soughtOf(read, least));
+  return { read, least, ...rankCandidates(rows, read.targets, query) };
+}
+
 /**
  * Measured search: what was asked, the page of parts that fit in the order wished, the rail, and near misses.
  *
@@ -85,11 +93,8 @@ async function presentAll(
  */
 export async function searchParts(engine: SearchEngine, query: SearchQuery): Promise<SearchAnswer> {
   const after = query.cursor === undefined ? null : readCursor(query.cursor, query.sort);
-  const read = await readNeed(query, query.q || null);
-  const { need, targets } = read;
-  const least = leastChance(query);
-  const rows = await loadCandidates(engine, read, query, soughtOf(read, least));
-  const { fitting, missing } = rankCandidates(rows, targets, query);
+  const { read, least, fitting, missing } = await rankedParts(engine, query);
+  const { need } = read;
 
   const keyOf = (ranked: Ranked) => sortKey(ranked, query.sort);
   const start = after ? countUpTo(fitting.map(keyOf), after) : 0;
