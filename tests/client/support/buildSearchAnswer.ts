@@ -9,10 +9,10 @@ const stated = (nominalMm: number, plusMinusMm: number) => ({
 });
 
 /** A wheel of this size, with this chance to fit. */
-export function buildItem({ title = "Test wheel", nominalMm = 44.2, chance = 0.96, id = title.replaceAll(" ", "-") } = {}): SearchItem {
+export function buildItem({ title = "Test wheel", nominalMm = 44.2, chance = 0.96 } = {}): SearchItem {
   return {
     part: {
-      id,
+      id: title.replaceAll(" ", "-"),
       kind: "idler-wheel",
       title,
       offerType: "stocked",
