@@ -38,6 +38,8 @@ export function useScrollPosition(): void {
   const positions = useRef<Record<string, number> | null>(null);
   positions.current ??= readStore();
   const last = useRef<string | null>(null);
+  // Set before anything scrolls for the new page, so that its scrolling is not noted for the old one.
+  const current = useRef(key);
 
   useEffect(() => {
     window.history.scrollRestoration = "manual";
@@ -54,15 +56,16 @@ export function useScrollPosition(): void {
 
   useEffect(() => {
     const note = () => {
-      if (positions.current) positions.current[key] = window.scrollY;
+      if (positions.current) positions.current[current.current] = window.scrollY;
     };
     addEventListener("scroll", note, { passive: true });
     return () => removeEventListener("scroll", note);
-  }, [key]);
+  }, []);
 
   useLayoutEffect(() => {
     const before = last.current;
     last.current = pathname;
+    current.current = key;
     const saved = positions.current?.[key];
     if (how === "POP") return saved ? scrollWhenTall(saved) : undefined;
     if (hash) document.getElementById(hash.slice(1))?.scrollIntoView();

@@ -70,7 +70,7 @@ function Family({ family }: { family: Answer }) {
             <DriveMapDrawing map={driveMap} points={servicePoints} litId={litId} onLight={setLit} onPick={goTo} />
           </div>
         </section>
-        <section>
+        <section className="points">
           <RuledHeading className="mt-6">{`Service points: ${servicePoints.length}`}</RuledHeading>
           {servicePoints.length === 0 ? (
             <p className="mt-3">None has been agreed yet.</p>

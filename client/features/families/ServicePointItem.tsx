@@ -1,12 +1,15 @@
 import { Link } from "react-router-dom";
 import { type DimensionName, dimensionsOf, kindFacts } from "#shared/domain/partKinds";
 import type { ServicePoint } from "#shared/schemas/catalogue";
+import { capitalised } from "../../lib/capitalised";
 import { sizeNumber } from "../../lib/formatSize";
 import { useUnit } from "../../lib/preferences";
 import { DimensionLabel } from "../../ui/DimensionLabel";
 import { Size } from "../../ui/Size";
 
 export const servicePointId = (id: string): string => `service-point-${id}`;
+
+const hundredths = (mm: number) => Math.round(mm * 100) / 100;
 
 type Props = {
   point: ServicePoint;
@@ -37,7 +40,7 @@ export function ServicePointItem({ point, familySlug, isLit, onLight }: Props) {
         <span className="grid size-7 place-items-center self-center rounded-full bg-measured text-small font-bold text-on-measured">
           {number}
         </span>
-        <h3 className="text-step1">{name}</h3>
+        <h3 className="text-step1">{capitalised(name)}</h3>
         <span className="text-soft">{kindFacts[partKind].name}</span>
         <Link
           to={`/find?family=${familySlug}&kind=${partKind}`}
@@ -53,13 +56,13 @@ export function ServicePointItem({ point, familySlug, isLit, onLight }: Props) {
       ) : (
         <ul className="mt-1 grid gap-0.5">
           {known.map(({ dimension, nominalMm, lowerMm, upperMm }) => (
-            <li key={dimension} className="flex flex-wrap gap-x-3">
-              <span className="min-w-32 text-soft">
+            <li key={dimension} className="grid grid-cols-[9.5rem_1fr] gap-x-3 sm:grid-cols-[9.5rem_10.5rem_1fr]">
+              <span className="text-soft">
                 <DimensionLabel name={dimension} />
               </span>
               <Size mm={nominalMm} unit={unit} both />
-              <span className="text-soft">
-                takes {sizeNumber(lowerMm, unit)} to {sizeNumber(upperMm, unit)}
+              <span className="col-start-2 text-soft sm:col-start-3">
+                takes {sizeNumber(hundredths(lowerMm), unit)} to {sizeNumber(hundredths(upperMm), unit)}
               </span>
             </li>
           ))}

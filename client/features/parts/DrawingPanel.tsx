@@ -7,13 +7,12 @@ import { DimensionLabel } from "../../ui/DimensionLabel";
 import { KitDrawing } from "../../ui/drawing/KitDrawing";
 import { PartDrawing } from "../../ui/drawing/PartDrawing";
 import { RuledHeading } from "../../ui/RuledHeading";
-import { Photos } from "./Photos";
 
 type Props = { page: PartPage; unit: SizeUnit };
 
 /** The part drawn from its numbers, the user's own laid over it dashed; photos come second. */
 export function DrawingPanel({ page, unit }: Props) {
-  const { part, need, photos } = page;
+  const { part, need } = page;
   const [params] = useSearchParams();
   const found = need.dimensions.filter(({ asFoundMm }) => asFoundMm !== null);
   const asFound = Object.fromEntries(found.map(({ dimension, asFoundMm }) => [dimension, asFoundMm ?? 0]));
@@ -68,7 +67,6 @@ export function DrawingPanel({ page, unit }: Props) {
           </p>
         )}
       </div>
-      <Photos photos={photos} />
     </section>
   );
 }

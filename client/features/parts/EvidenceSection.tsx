@@ -1,5 +1,6 @@
 import { Link } from "react-router-dom";
 import type { FitClaim, PartPage } from "#shared/schemas/catalogue";
+import { capitalised } from "../../lib/capitalised";
 import { RuledHeading } from "../../ui/RuledHeading";
 
 const claimWords: Record<FitClaim["evidence"], string> = {
@@ -26,7 +27,7 @@ export function EvidenceSection({ page }: { page: PartPage }) {
             {part.kitLines.map(({ id, title, quantity, servicePointName }) => (
               <li key={id}>
                 <span className="font-semibold">
-                  {quantity} × {title}
+                  {quantity} × {capitalised(title)}
                 </span>
                 {servicePointName && <span className="text-soft">, for the {servicePointName.toLowerCase()}</span>}
               </li>
@@ -42,7 +43,7 @@ export function EvidenceSection({ page }: { page: PartPage }) {
       )}
       <section>
         <RuledHeading className="mt-6">Fitted by others</RuledHeading>
-        <p className="mt-2 max-w-prose">{evidence.sentence}.</p>
+        <p className="mt-2 max-w-prose">{capitalised(evidence.sentence).replace(/\.?$/, ".")}</p>
         {counts.length > 0 && (
           <ul className="mt-1 flex flex-wrap gap-x-6 text-soft">
             {counts.map(({ words, count }) => (
@@ -56,7 +57,7 @@ export function EvidenceSection({ page }: { page: PartPage }) {
           <ul className="mt-2 grid gap-1">
             {fitClaims.map(({ familySlug, familyName, servicePointName, evidence: basis }) => (
               <li key={`${familySlug}${servicePointName}`}>
-                {servicePointName} of the <Link to={`/families/${familySlug}`}>{familyName}</Link>
+                {capitalised(servicePointName)} of the <Link to={`/families/${familySlug}`}>{familyName}</Link>
                 <span className="text-soft">, {claimWords[basis]}</span>
               </li>
             ))}

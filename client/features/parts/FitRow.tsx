@@ -34,7 +34,7 @@ export function FitRow({ name, stated, fit, need, unit }: Props) {
   return (
     <li className="grid grid-cols-[minmax(0,1fr)] gap-1 border-b border-rule py-3">
       <div className="flex flex-wrap items-baseline gap-x-4">
-        <span className="min-w-24 font-semibold">
+        <span className="min-w-12 font-semibold sm:min-w-24">
           <DimensionLabel name={name} />
         </span>
         {stated ? (

@@ -18,6 +18,7 @@ import { DrawingPanel } from "./DrawingPanel";
 import { EvidenceSection } from "./EvidenceSection";
 import { FitPanel } from "./FitPanel";
 import { PartSkeleton } from "./PartSkeleton";
+import { Photos } from "./Photos";
 import { TraderSection } from "./TraderSection";
 
 /** The need in the address, as the server is asked: without a kind where nothing was measured, so that none is assumed. */
@@ -113,6 +114,7 @@ function Part({ page, unit }: { page: Answer; unit: SizeUnit }) {
           <BuyPanel page={page} />
         </div>
         <div className="grid content-start gap-2" style={{ gridArea: "about" }}>
+          <Photos photos={page.photos} />
           <EvidenceSection page={page} />
           <TraderSection page={page} />
         </div>

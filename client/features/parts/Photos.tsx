@@ -6,9 +6,7 @@ export function Photos({ photos }: { photos: readonly Photo[] }) {
   if (photos.length === 0) return null;
   return (
     <section className="print:hidden">
-      <RuledHeading level={3} className="mt-4">
-        {photos.length === 1 ? "Photo" : `Photos: ${photos.length}`}
-      </RuledHeading>
+      <RuledHeading className="mt-6">{photos.length === 1 ? "Photo" : `Photos: ${photos.length}`}</RuledHeading>
       <ul className="mt-3 grid grid-cols-2 gap-3 sm:grid-cols-3">
         {photos.map(({ url, alt, width, height }) => (
           <li key={url}>

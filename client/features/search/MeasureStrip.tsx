@@ -196,8 +196,8 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
           <Button type="submit" look="primary" className="strip-submit">
             {submitWords}
           </Button>
-          {aside}
         </div>
+        {aside}
         <div className={`strip-notes ${look === "compact" ? "hidden" : ""}`}>
           {isWritten ? (
             <Suspense fallback={<p>&nbsp;</p>}>

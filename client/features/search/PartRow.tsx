@@ -2,6 +2,7 @@ import { Link } from "react-router-dom";
 import { formatMoney } from "#shared/domain/money";
 import type { Need } from "#shared/schemas/need";
 import type { SearchItem } from "#shared/schemas/search";
+import { capitalised } from "../../lib/capitalised";
 import type { SizeUnit } from "../../lib/formatSize";
 import { needWords } from "../../lib/needWords";
 import { PartDrawing } from "../../ui/drawing/PartDrawing";
@@ -114,7 +115,7 @@ export function PartRow({ item, need, needQuery, unit, scale, isLit, onLight, fr
             <span className="ml-1">{failing ?? fit.reason}</span>
           </p>
         )}
-        <p className="mt-1 text-soft">{evidence.sentence}</p>
+        <p className="mt-1 text-soft">{capitalised(evidence.sentence)}</p>
       </div>
       {drawn && (
         <div style={{ gridArea: "sizes" }} className="grid content-start gap-1">

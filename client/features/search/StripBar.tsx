@@ -15,7 +15,7 @@ function BackToResults() {
   if (!from && !need.has("kind")) return null;
   const words = from ? `back to ${from.total === 1 ? "1 part" : `${from.total} parts`}` : "all parts of this size";
   return (
-    <Link to={from ? from.backTo : `/find?${need}`} className="ml-4 inline-flex min-h-6 items-center whitespace-nowrap">
+    <Link to={from ? from.backTo : `/find?${need}`} className="inline-flex min-h-8 items-center">
       {words}
     </Link>
   );
