@@ -7,6 +7,8 @@ import type { Ranked } from "./rankCandidates";
 const mostTicks = 60;
 /** Places kept for parts that do not fit, so that the rail shows what lies on both sides. */
 const keptForUnfit = 16;
+/** Left free at both ends, so that nothing stands at the very edge. */
+const marginShare = 0.04;
 
 /** The size that the rail runs along: the primary one, else the first that is known. Null where several kinds are searched. */
 export function railSizeOf({ kind, dimensions }: Need): NeedDimension | null {
@@ -65,11 +67,12 @@ export function searchRail(need: Need, fitting: readonly Ranked[], missing: read
     size.asNewMm + uncertain,
     ...ticks.map(({ nominalMm, plusMinusMm }) => nominalMm + plusMinusMm),
   );
+  const margin = (highest - lowest) * marginShare;
   const step = neatStep(highest - lowest);
   return {
     dimension: size.dimension,
-    fromMm: Math.max(0, toStep(lowest, step, Math.floor)),
-    toMm: toStep(highest, step, Math.ceil),
+    fromMm: Math.max(0, toStep(lowest - margin, step, Math.floor)),
+    toMm: toStep(highest + margin, step, Math.ceil),
     ticks,
   };
 }
