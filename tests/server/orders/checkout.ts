@@ -68,14 +68,17 @@ export async function sessionOf(orderId: string): Promise<string> {
 }
 
 /**
- * Sends a checkout whose payment page is made at the provider while its answer is lost: the connection is cut after the
- * work, and the client's own two further tries fail.
+ * Does something whose call to the provider is carried out there while its answer is lost: the connection is cut after
+ * the work, and the client's own two further tries fail. `on` is the call: to make a payment page, unless given.
  */
-export async function loseTheAnswer<Answer>({ stripe: { control } }: TestSite, send: () => PromiseLike<Answer>) {
-  const on = "POST /v1/checkout/sessions";
+export async function loseTheAnswer<Answer>(
+  { stripe: { control } }: TestSite,
+  act: () => PromiseLike<Answer>,
+  on = "POST /v1/checkout/sessions",
+): Promise<Answer> {
   control.trouble({ kind: "hold", on });
   control.trouble({ kind: "cut-after-commit", on });
-  const answer = Promise.resolve(send());
+  const answer = Promise.resolve(act());
   // Held, it is past the check for failures, which then meet the tries that follow alone.
   await expect.poll(() => control.heldRequests()).toBe(1);
   control.trouble({ kind: "fail", times: 2, on });

@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import type { Actor } from "#server/policies/Actor";
 import { orderPolicy } from "#server/policies/orderPolicy";
-import { type OrderState, orderStates } from "#shared/schemas/order";
+import { type OrderState, orderStates } from "#shared/domain/orderState";
 
 const buyer: Actor = { id: "buyer", role: "restorer", workshopId: null };
 const stranger: Actor = { id: "stranger", role: "restorer", workshopId: null };

@@ -179,6 +179,18 @@ describe("cancelling", () => {
     await me.post(`/orders/${orderId}/cancel`).expect(200);
   });
 
+  it("is what happens to an order whose buyer asked for it, when its page then closes by itself", async () => {
+    const part = await buildPart();
+    const { me, orderId, sessionId } = await waitingOrder(site, [part]);
+    site.stripe.control.trouble({ kind: "fail", times: 3, on: "POST /v1/checkout/sessions/:session/expire" });
+    await me.post(`/orders/${orderId}/cancel`).expect(503);
+    await site.services.payments.checkout.sessions.expire(sessionId);
+    await site.stripe.control.settled();
+    await runJobs(site);
+    expect(await stateOf(orderId)).toBe("cancelled");
+    expect((await part.reload()).stockReserved).toBe(0);
+  });
+
   it("finds the page that was lost on the way, and closes it too", async () => {
     const part = await buildPart();
     const { me, user } = await signedInBuyer(site);

@@ -1,9 +1,7 @@
 import { randomUUID } from "node:crypto";
 import fc from "fast-check";
-import request from "supertest";
 import { afterAll, afterEach, beforeAll, describe, expect, it } from "vitest";
 import { applyPaymentEvent } from "#server/commands/applyPaymentEvent";
-import { expireOrder } from "#server/commands/expireOrder";
 import { balances } from "#server/ledger/balances";
 import { AuditEntry } from "#server/models/AuditEntry";
 import { LedgerTransaction } from "#server/models/LedgerTransaction";
@@ -13,7 +11,6 @@ import { Parcel } from "#server/models/Parcel";
 import { Payment } from "#server/models/Payment";
 import { PaymentEvent } from "#server/models/PaymentEvent";
 import {
-  at,
   checkOut,
   fill,
   loseTheAnswer,
@@ -24,6 +21,7 @@ import {
 } from "#tests/server/orders/checkout";
 import { buildPart } from "#tests/support/factories";
 import { startTestSite, type TestSite } from "#tests/support/testSite";
+import { completed, eventOf, expectPaidOnce, orderNow, signed, tell } from "./events";
 
 let site: TestSite;
 beforeAll(async () => {
@@ -31,55 +29,6 @@ beforeAll(async () => {
 });
 afterEach(() => site.stripe.control.reset());
 afterAll(() => site.close());
-
-const webhook = "/api/v1/webhooks/stripe";
-const orderNow = (id: string) => Order.findByPk(id, { rejectOnEmpty: true });
-
-/** An event as the provider would send it, signed with the secret of the site. */
-function signed(event: object, { secret, ageSeconds = 0 }: { secret?: string; ageSeconds?: number } = {}) {
-  const payload = JSON.stringify(event);
-  const header = site.services.payments.webhooks.generateTestHeaderString({
-    payload,
-    secret: secret ?? site.services.config.stripe.webhookSecret,
-    timestamp: Math.floor(Date.now() / 1000) - ageSeconds,
-  });
-  return request(site.url).post(webhook).set("stripe-signature", header).type("application/json").send(payload);
-}
-
-const eventOf = (type: string, object: object, id = `evt_${randomUUID()}`) => ({
-  id,
-  object: "event",
-  type,
-  created: Math.floor(Date.now() / 1000),
-  data: { object },
-});
-
-const completed = (orderId: string, sessionId: string, given: object = {}) => ({
-  id: sessionId,
-  client_reference_id: orderId,
-  amount_total: 2600,
-  currency: "eur",
-  payment_status: "paid",
-  payment_intent: `pi_${randomUUID()}`,
-  ...given,
-});
-
-async function tell(event: { id: string }) {
-  await signed(event).expect(200);
-  await runJobs(site);
-  return (await PaymentEvent.findByPk(event.id, { rejectOnEmpty: true })).outcome;
-}
-
-/** Everything that one paid order leaves behind, and nothing twice. */
-async function expectPaidOnce(orderId: string) {
-  const order = await orderNow(orderId);
-  expect(order).toMatchObject({ state: "paid", refundedMinor: 0 });
-  const parcels = await Parcel.findAll({ where: { orderId } });
-  expect(await Mail.count({ where: { cause: `order-confirmation:${orderId}:buyer` } })).toBe(1);
-  for (const { id } of parcels) expect(await Mail.count({ where: { cause: `new-order:${id}:workshop` } })).toBe(1);
-  expect(await LedgerTransaction.count({ where: { orderId } })).toBe(1);
-  expect(await AuditEntry.count({ where: { subjectId: orderId, action: "order-paid" } })).toBe(1);
-}
 
 describe("a payment event", () => {
   it("makes the order paid, with everything that follows", async () => {
@@ -143,7 +92,7 @@ describe("a payment event", () => {
           eventOf("payment_intent.payment_failed", { id: "pi", metadata: { orderId } }),
         ];
         for (const index of [...sequence, 0]) {
-          await signed(events[index]!).expect(200);
+          await signed(site, events[index]!).expect(200);
           await applyPaymentEvent(site.services, events[index]!.id);
         }
         await runJobs(site);
@@ -170,7 +119,7 @@ describe("a payment event", () => {
 
   it("of a type that means nothing here is kept and marked so", async () => {
     const event = eventOf("customer.created", { id: "cus_1" });
-    expect(await tell(event)).toBe("ignored");
+    expect(await tell(site, event)).toBe("ignored");
     expect(await PaymentEvent.findByPk(event.id)).toMatchObject({ type: "customer.created", deliveries: 1 });
   });
 
@@ -205,7 +154,9 @@ describe("a payment that does not match", () => {
   ])("in its %s never makes an order paid, and is written down", async (difference, given) => {
     const part = await buildPart();
     const { orderId, sessionId } = await waitingOrder(site, [part]);
-    expect(await tell(eventOf("checkout.session.completed", completed(orderId, sessionId, given)))).toBe("mismatch");
+    expect(await tell(site, eventOf("checkout.session.completed", completed(orderId, sessionId, given)))).toBe(
+      "mismatch",
+    );
     expect((await orderNow(orderId)).state).toBe("awaiting-payment");
     expect(await part.reload()).toMatchObject({ stockOnHand: 10, stockReserved: 1 });
     const entry = await AuditEntry.findOne({ where: { subjectId: orderId, action: "payment-mismatch" } });
@@ -218,140 +169,15 @@ describe("a payment that does not match", () => {
     ["without an order", completed("", "cs_1"), "unreadable"],
     ["without an amount", { ...completed(randomUUID(), "cs_1"), amount_total: null }, "unreadable"],
   ])("%s changes nothing", async (_what, object, outcome) => {
-    expect(await tell(eventOf("checkout.session.completed", object))).toBe(outcome);
+    expect(await tell(site, eventOf("checkout.session.completed", object))).toBe(outcome);
   });
 
   it("yet, because the money is still on its way, waits", async () => {
     const { orderId, sessionId } = await waitingOrder(site, [await buildPart()]);
     const unpaid = completed(orderId, sessionId, { payment_status: "unpaid" });
-    expect(await tell(eventOf("checkout.session.completed", unpaid))).toBe("not-paid-yet");
+    expect(await tell(site, eventOf("checkout.session.completed", unpaid))).toBe("not-paid-yet");
     expect((await orderNow(orderId)).state).toBe("awaiting-payment");
     const later = completed(orderId, sessionId);
-    expect(await tell(eventOf("checkout.session.async_payment_succeeded", later))).toBe("paid");
-  });
-});
-
-describe("a payment that comes too late", () => {
-  /** An order that ran out while its payment was on the way to us. */
-  async function paidButExpired(stockOnHand: number) {
-    const part = await buildPart({ stockOnHand });
-    const { user, me, orderId, sessionId } = await waitingOrder(site, [part]);
-    site.stripe.control.setWebhooks({ mode: "hold" });
-    await tell(eventOf("checkout.session.expired", { client_reference_id: orderId }));
-    expect((await orderNow(orderId)).state).toBe("expired");
-    await site.stripe.control.pay(sessionId);
-    const deliver = async () => {
-      await site.stripe.control.deliver();
-      await runJobs(site);
-    };
-    return { part, user, me, orderId, sessionId, deliver };
-  }
-
-  it("takes the stock again where it is still there", async () => {
-    const { part, orderId, deliver } = await paidButExpired(1);
-    await deliver();
-    await expectPaidOnce(orderId);
-    expect(await part.reload()).toMatchObject({ stockOnHand: 0, stockReserved: 0 });
-  });
-
-  it("goes back where the stock is gone: once, booked both ways, and told", async () => {
-    const { part, user, me, orderId, sessionId, deliver } = await paidButExpired(1);
-    await part.update({ stockOnHand: 0 });
-    await deliver();
-    await site.stripe.control.deliver(
-      site.stripe.control
-        .events("checkout.session.completed")
-        .slice(-1)
-        .map(({ id }) => id),
-    );
-    await runJobs(site);
-
-    expect(await orderNow(orderId)).toMatchObject({ state: "expired", refundedMinor: 2600 });
-    expect(await part.reload()).toMatchObject({ stockOnHand: 0, stockReserved: 0 });
-    const payment = await Payment.findOne({ where: { orderId }, rejectOnEmpty: true });
-    expect(payment).toMatchObject({ state: "refunded", sessionId });
-    const refunds = await site.services.payments.refunds.list({ payment_intent: payment.paymentIntentId! });
-    expect(refunds.data.map(({ amount, status }) => [amount, status])).toEqual([[2600, "succeeded"]]);
-    const booked = await LedgerTransaction.findAll({ where: { orderId }, order: [["id", "ASC"]] });
-    expect(booked.map(({ cause }) => cause)).toEqual([`order-paid-late:${orderId}`, `order-refunded:${orderId}`]);
-    const owed = (await balances()).filter(({ account }) => account === "refunds");
-    expect(owed.every(({ amountMinor }) => amountMinor === 0)).toBe(true);
-    const mails = await Mail.findAll({ where: { recipient: user.email } });
-    expect(mails.map(({ template }) => template)).toEqual(["order-refunded"]);
-    const { body } = await me.get(`/orders/${orderId}`);
-    expect(body.history.map(({ what }: { what: string }) => what).slice(-2)).toEqual([
-      "A payment came too late; it is being given back",
-      "The payment was given back",
-    ]);
-  });
-
-  it("goes back once the provider answers again, and only once", async () => {
-    const { part, orderId, deliver } = await paidButExpired(1);
-    await part.update({ stockOnHand: 0 });
-    site.stripe.control.trouble({ kind: "fail", times: 3, on: "POST /v1/refunds" });
-    await deliver();
-    expect((await orderNow(orderId)).refundedMinor).toBe(0);
-    await site.services.pool.query("UPDATE graphile_worker._private_jobs SET run_at = now() WHERE key = $1", [
-      `refund:${orderId}`,
-    ]);
-    await runJobs(site);
-    expect((await orderNow(orderId)).refundedMinor).toBe(2600);
-    const payment = await Payment.findOne({ where: { orderId }, rejectOnEmpty: true });
-    const refunds = await site.services.payments.refunds.list({ payment_intent: payment.paymentIntentId! });
-    expect(refunds.data).toHaveLength(1);
-  });
-
-  it("goes back where the order was cancelled meanwhile", async () => {
-    const { orderId, sessionId } = await waitingOrder(site, [await buildPart()]);
-    site.stripe.control.setWebhooks({ mode: "hold" });
-    await Order.update({ state: "cancelled" }, { where: { id: orderId } });
-    await site.stripe.control.pay(sessionId);
-    await site.stripe.control.deliver();
-    await runJobs(site);
-    expect(await orderNow(orderId)).toMatchObject({ state: "cancelled", refundedMinor: 2600 });
-  });
-
-  it("may meet the job that ends the hold, whichever comes first", async () => {
-    const part = await buildPart({ stockOnHand: 5 });
-    const { orderId, sessionId } = await waitingOrder(site, [part]);
-    const order = await orderNow(orderId);
-    await Promise.all([
-      payAndApply(site, sessionId),
-      expireOrder(site.services, orderId, at(order, 36)).catch(() => undefined),
-    ]).catch(() => undefined);
-    await site.stripe.control.settled();
-    await runJobs(site);
-    const { state } = await orderNow(orderId);
-    const { stockOnHand, stockReserved } = await part.reload();
-    expect([
-      ["paid", 4, 0],
-      ["expired", 5, 0],
-    ]).toContainEqual([state, stockOnHand, stockReserved]);
-  });
-});
-
-describe("what is not from the provider", () => {
-  const event = () => eventOf("checkout.session.expired", { client_reference_id: randomUUID() });
-
-  it.each([
-    ["signed with another secret", () => signed(event(), { secret: "whsec_other" })],
-    ["signed too long ago", () => signed(event(), { ageSeconds: 400 })],
-    ["not signed", () => request(site.url).post(webhook).send(event())],
-    ["empty", () => request(site.url).post(webhook)],
-    ["changed after signing", () => signed(event()).send(" ")],
-  ])("is refused when it is %s, and not kept", async (_what, send) => {
-    const before = await PaymentEvent.count();
-    const res = await send();
-    expect([res.status, res.type]).toEqual([400, "application/problem+json"]);
-    expect(await PaymentEvent.count()).toBe(before);
-  });
-
-  it("is refused when it is too large", async () => {
-    const res = await request(site.url).post(webhook).type("application/json").send("x".repeat(600_000));
-    expect(res.status).toBe(413);
-  });
-
-  it("gets 405 for anything but a post", async () => {
-    await request(site.url).get(webhook).expect(405);
+    expect(await tell(site, eventOf("checkout.session.async_payment_succeeded", later))).toBe("paid");
   });
 });
