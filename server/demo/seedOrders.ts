@@ -1,5 +1,7 @@
 import type { Transaction } from "sequelize";
-import type { Address, OrderState, ParcelState } from "#shared/schemas/order";
+import type { OrderState } from "#shared/domain/orderState";
+import type { ParcelState } from "#shared/domain/parcelState";
+import type { Address } from "#shared/schemas/order";
 import { audit } from "../audit";
 import { readBasket } from "../basket/readBasket";
 import { writeOrder } from "../commands/writeOrder";

@@ -1,7 +1,7 @@
 import { escapeHtml } from "./escapeHtml";
 import { type Block, type Letter, type LetterPart, oneLine } from "./Letter";
 
-/** The light tokens of the drafting room (design.md). Mail has no style sheet that all readers keep, so they stand here. */
+/** The light tokens of client/styles/tokens.css. Mail has no style sheet that all readers keep, so they stand here. */
 const ground = "#EEF2F0";
 const sheet = "#F8FAF9";
 const ink = "#16202E";

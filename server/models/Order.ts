@@ -6,7 +6,8 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { Address, OrderState } from "#shared/schemas/order";
+import type { OrderState } from "#shared/domain/orderState";
+import type { Address } from "#shared/schemas/order";
 
 /** What one buyer pays at once. */
 export class Order extends Model<InferAttributes<Order>, InferCreationAttributes<Order>> {

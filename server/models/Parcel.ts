@@ -6,8 +6,8 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
+import type { ParcelState } from "#shared/domain/parcelState";
 import type { TraderIdentity } from "#shared/schemas/catalogue";
-import type { ParcelState } from "#shared/schemas/order";
 
 /** The part of an order that one workshop ships. */
 export class Parcel extends Model<InferAttributes<Parcel>, InferCreationAttributes<Parcel>> {

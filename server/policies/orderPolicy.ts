@@ -1,4 +1,4 @@
-import type { OrderState } from "#shared/schemas/order";
+import type { OrderState } from "#shared/domain/orderState";
 import type { Actor } from "./Actor";
 
 /** An order as its policy sees it: who bought, in what state, and whose parcels it has. */

@@ -1,7 +1,8 @@
-import type { OrderState } from "../schemas/order";
+export const orderStates = ["draft", "awaiting-payment", "paid", "closed", "expired", "cancelled"] as const;
+export type OrderState = (typeof orderStates)[number];
 
 /**
- * What an order may become next (product.md, "States").
+ * What an order may become next.
  *
  * A payment that reaches us after the order expired still counts where the stock is there: the buyer has paid.
  */

@@ -1,7 +1,20 @@
-import type { ParcelState } from "../schemas/order";
+export const parcelStates = [
+  "to-accept",
+  "core-awaited",
+  "core-received",
+  "core-refused",
+  "in-work",
+  "ready",
+  "dispatched",
+  "delivered",
+  "closed",
+  "declined",
+  "cancelled",
+] as const;
+export type ParcelState = (typeof parcelStates)[number];
 
 /**
- * What a parcel may become next (product.md, "States").
+ * What a parcel may become next.
  *
  * Only parcels with a re-mould pass through the core's states; a refused core may be followed by another one. A workshop
  * declines before it begins; a parcel is cancelled at any time before it has left.

@@ -1,4 +1,6 @@
 import { z } from "zod";
+import { orderStates } from "../domain/orderState";
+import { parcelStates } from "../domain/parcelState";
 import { TraderIdentity } from "./catalogue";
 import { CountryCode, Currency, Cursor, Id, Minor, Time } from "./common";
 import { ListingKind, StatedDimensions, WorkshopSummary } from "./part";
@@ -22,25 +24,9 @@ export const Address = z.object({
 });
 export type Address = z.infer<typeof Address>;
 
-export const orderStates = ["draft", "awaiting-payment", "paid", "closed", "expired", "cancelled"] as const;
 export const OrderState = z.enum(orderStates);
-export type OrderState = z.infer<typeof OrderState>;
 
-export const parcelStates = [
-  "to-accept",
-  "core-awaited",
-  "core-received",
-  "core-refused",
-  "in-work",
-  "ready",
-  "dispatched",
-  "delivered",
-  "closed",
-  "declined",
-  "cancelled",
-] as const;
 export const ParcelState = z.enum(parcelStates);
-export type ParcelState = z.infer<typeof ParcelState>;
 
 /** Asks for an order from the basket as it stands, and for the page to pay it on. */
 export const PlaceOrder = z.object({

@@ -1,4 +1,4 @@
-import type { OrderState } from "#shared/schemas/order";
+import type { OrderState } from "#shared/domain/orderState";
 
 const colours: Record<OrderState, string> = {
   draft: "text-soft",

@@ -1,4 +1,4 @@
-import type { ParcelState } from "#shared/schemas/order";
+import type { ParcelState } from "#shared/domain/parcelState";
 import { parcelStateWords, stationsOf } from "./orderWords";
 
 /** A parcel's way as a rail: its stations in order, a pointer at the one where it is. In words alone where it left the way. */

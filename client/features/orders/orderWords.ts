@@ -1,5 +1,7 @@
 import { formatMoney } from "#shared/domain/money";
-import type { Order, OrderState, ParcelState } from "#shared/schemas/order";
+import type { OrderState } from "#shared/domain/orderState";
+import type { ParcelState } from "#shared/domain/parcelState";
+import type { Order } from "#shared/schemas/order";
 import { formatUntil } from "./formatMoment";
 
 /** An order's state as a heading. */

@@ -1,9 +1,8 @@
 import { describe, expect, it } from "vitest";
-import { orderMayBecome, orderStateWords } from "#shared/domain/orderState";
-import { parcelMayBecome } from "#shared/domain/parcelState";
-import { orderStates, parcelStates } from "#shared/schemas/order";
+import { orderMayBecome, orderStates, orderStateWords } from "#shared/domain/orderState";
+import { parcelMayBecome, parcelStates } from "#shared/domain/parcelState";
 
-/** Every move there is; any pair that is not listed is refused. Source: product.md, "States". */
+/** Every move there is; any pair that is not listed is refused. */
 const orderMoves = [
   "draft>awaiting-payment",
   "draft>cancelled",
