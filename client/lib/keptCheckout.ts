@@ -15,15 +15,14 @@ function read(name: string): unknown {
   }
 }
 
-// Without storage the page's own memory has to do.
+// Where the browser keeps no storage, the page's own memory has to do.
 const memory = new Map<string, unknown>();
 const load = (name: string): unknown => read(name) ?? memory.get(name) ?? null;
 function store(name: string, value: unknown): void {
-  memory.set(name, value);
   try {
     sessionStorage.setItem(name, JSON.stringify(value));
   } catch {
-    // Kept in memory above.
+    memory.set(name, value);
   }
 }
 function drop(name: string): void {

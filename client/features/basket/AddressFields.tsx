@@ -1,4 +1,4 @@
-import type { UseFormReturn } from "react-hook-form";
+import { type UseFormReturn, useFormState, useWatch } from "react-hook-form";
 import { TextField } from "../../ui/TextField";
 import { CountryField } from "./CountryField";
 import type { CheckoutValues } from "./checkoutValues";
@@ -12,7 +12,9 @@ type Props = {
 
 /** An address as it stands on a label. */
 export function AddressFields({ form, name, group }: Props) {
-  const errors = form.formState.errors[name];
+  const { errors: all } = useFormState({ control: form.control, name });
+  const errors = all[name];
+  const country = useWatch({ control: form.control, name: `${name}.country` });
   const field = (part: keyof CheckoutValues["shippingAddress"], token: string) => ({
     ...form.register(`${name}.${part}`),
     autoComplete: `${group} ${token}`,
@@ -30,7 +32,7 @@ export function AddressFields({ form, name, group }: Props) {
         <TextField label="Town" {...field("town", "address-level2")} />
       </div>
       <TextField label="State or region" optional {...field("region", "address-level1")} />
-      <CountryField current={form.watch(`${name}.country`)} {...field("country", "country")} />
+      <CountryField current={country} {...field("country", "country")} />
     </div>
   );
 }

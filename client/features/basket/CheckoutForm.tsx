@@ -1,6 +1,6 @@
 import { keepPreviousData, useQuery } from "@tanstack/react-query";
 import { type ReactNode, useEffect } from "react";
-import { useForm } from "react-hook-form";
+import { useForm, useWatch } from "react-hook-form";
 import { basketQuery } from "../../lib/basket";
 import { keepDraft, readDraft } from "../../lib/keptCheckout";
 import { listFieldErrors } from "../../lib/listFieldErrors";
@@ -13,7 +13,7 @@ import type { SavedAddress } from "./api";
 import { BasketSkeleton } from "./BasketSkeleton";
 import { CheckBeforePaying } from "./CheckBeforePaying";
 import { CheckoutProblem } from "./CheckoutProblem";
-import { type CheckoutValues, checkoutResolver, shippingOf, startValues } from "./checkoutValues";
+import { type CheckoutValues, checkoutResolver, startValues } from "./checkoutValues";
 import { Step } from "./Step";
 import { useOrder } from "./useOrder";
 import { WhereTo } from "./WhereTo";
@@ -40,8 +40,12 @@ export function CheckoutForm({ userId, saved, sendVerification }: Props) {
     return stop;
   }, [form, userId]);
 
-  const values = form.watch();
-  const country = shippingOf(values, saved).country;
+  // Only these, so that a keystroke does not draw every part again.
+  const [choice, written, hasOtherBilling] = useWatch({
+    control: form.control,
+    name: ["choice", "shippingAddress.country", "hasOtherBilling"],
+  });
+  const country = saved.find(({ id }) => id === choice)?.country ?? written;
   useEffect(() => {
     if (country) keepShipTo(country);
   }, [country]);
@@ -60,7 +64,7 @@ export function CheckoutForm({ userId, saved, sendVerification }: Props) {
         <Step number={2} title="Who pays">
           <div className="grid gap-5">
             <CheckField label="The bill goes to another address" {...form.register("hasOtherBilling")} />
-            {values.hasOtherBilling && <AddressFields form={form} name="billingAddress" group="billing" />}
+            {hasOtherBilling && <AddressFields form={form} name="billingAddress" group="billing" />}
           </div>
         </Step>
         <Step number={3} title="Check before you pay">

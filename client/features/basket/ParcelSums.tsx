@@ -3,7 +3,10 @@ import { taxWords } from "../../lib/taxWords";
 import { Money } from "../../ui/Money";
 import { TitleBlock } from "../../ui/TitleBlock";
 
-type Sums = Pick<BasketParcel, "partsMinor" | "shippingMinor" | "taxMinor" | "taxRatePercent" | "totalMinor" | "problem">;
+type Sums = Pick<
+  BasketParcel,
+  "partsMinor" | "shippingMinor" | "taxMinor" | "taxRatePercent" | "totalMinor" | "problem"
+>;
 
 /** What one parcel costs, in a title block. */
 export function ParcelSums({ parcel, currency, label }: { parcel: Sums; currency: string; label: string }) {

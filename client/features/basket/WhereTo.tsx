@@ -1,4 +1,4 @@
-import type { UseFormReturn } from "react-hook-form";
+import { type UseFormReturn, useWatch } from "react-hook-form";
 import { countryName } from "#shared/domain/countries";
 import { AddressFields } from "./AddressFields";
 import type { SavedAddress } from "./api";
@@ -11,7 +11,7 @@ const written = ({ line1, line2, postcode, town, region, country }: SavedAddress
 
 /** One of the addresses used before, or another one. */
 export function WhereTo({ form, saved }: Props) {
-  const isOther = form.watch("choice") === otherAddress;
+  const isOther = useWatch({ control: form.control, name: "choice" }) === otherAddress;
   return (
     <div className="grid gap-6">
       {saved.length > 0 && (
