@@ -30,6 +30,7 @@ export default defineConfig({
           include: ["tests/client/**/*.test.{ts,tsx}"],
           environment: "jsdom",
           setupFiles: ["tests/support/dom.ts"],
+          testTimeout: 20_000,
         },
       },
       {

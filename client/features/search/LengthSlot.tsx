@@ -33,43 +33,45 @@ export function LengthSlot({ name, text, unit, problem, example, onText, onRemov
   const echo = echoBeside(text, unit);
   const width = { "--slot-width": `${Math.max(text.length, example.length) + 1}ch` } as CSSProperties;
   return (
-    <span className="inline-block whitespace-nowrap">
-      <label htmlFor={id} className="text-soft">
-        <DimensionLabel name={name} />{" "}
-      </label>
-      <input
-        id={id}
-        name={name}
-        type="text"
-        value={text}
-        placeholder={example}
-        autoComplete="off"
-        autoCapitalize="off"
-        spellCheck={false}
-        maxLength={60}
-        className="slot slot-measured"
-        style={width}
-        aria-invalid={shownProblem ? true : undefined}
-        aria-describedby={`${id}-echo${shownProblem ? ` ${id}-problem` : ""}`}
-        onChange={(event) => onText(event.target.value)}
-        onBlur={() => setSettled(true)}
-        onInvalid={() => setSettled(true)}
-      />
-      <span id={`${id}-echo`} className="strip-echo">
-        {echo}
+    <span className="inline-flex flex-col align-baseline whitespace-nowrap">
+      <span>
+        <label htmlFor={id} className="text-soft">
+          <DimensionLabel name={name} />{" "}
+        </label>
+        <input
+          id={id}
+          name={name}
+          type="text"
+          value={text}
+          placeholder={example}
+          autoComplete="off"
+          autoCapitalize="off"
+          spellCheck={false}
+          maxLength={60}
+          className="slot slot-measured"
+          style={width}
+          aria-invalid={shownProblem ? true : undefined}
+          aria-describedby={`${id}-echo${shownProblem ? ` ${id}-problem` : ""}`}
+          onChange={(event) => onText(event.target.value)}
+          onBlur={() => setSettled(true)}
+          onInvalid={() => setSettled(true)}
+        />
+        <span id={`${id}-echo`} className="strip-echo">
+          {echo}
+        </span>
+        {onRemove && (
+          <button
+            type="button"
+            className="strip-remove"
+            aria-label={`Leave out ${dimensionWords[name]}`}
+            onClick={onRemove}
+          >
+            <svg width="10" height="10" viewBox="0 0 10 10" aria-hidden="true">
+              <path d="M1 1L9 9M9 1L1 9" stroke="currentColor" strokeWidth="1.6" />
+            </svg>
+          </button>
+        )}
       </span>
-      {onRemove && (
-        <button
-          type="button"
-          className="strip-remove"
-          aria-label={`Leave out ${dimensionWords[name]}`}
-          onClick={onRemove}
-        >
-          <svg width="10" height="10" viewBox="0 0 10 10" aria-hidden="true">
-            <path d="M1 1L9 9M9 1L1 9" stroke="currentColor" strokeWidth="1.6" />
-          </svg>
-        </button>
-      )}
       {shownProblem && (
         <span id={`${id}-problem`} className="strip-problem">
           {shownProblem}

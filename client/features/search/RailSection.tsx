@@ -34,8 +34,8 @@ export function RailSection({ answer, unit, needKey, litId, onLight }: Props) {
     <section className="contents" aria-label="Size rail">
       <RuledHeading className="mt-6">
         <span>
-          {capitalised(dimensionWords[rail.dimension])} in {unitWords}: {rail.ticks.length} parts lie here, {fitting}{" "}
-          likely to fit
+          {capitalised(dimensionWords[rail.dimension])} in {unitWords}: {rail.ticks.length} parts, {fitting} likely to
+          fit
         </span>
       </RuledHeading>
       <SizeRail

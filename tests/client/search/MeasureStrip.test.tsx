@@ -8,7 +8,7 @@ import { stubApi } from "../support/stubApi";
 const renderStrip = (address = "/") =>
   renderAt(address, { "/": null, "/find": null, "/parts/:id": null }, <StripBar />);
 const address = () => screen.getByLabelText("address").textContent ?? "";
-const diameter = () => screen.getByRole("textbox", { name: "outside diameter" });
+const diameter = () => screen.getByLabelText("outside diameter");
 
 describe("the measure strip", () => {
   beforeEach(() => {
