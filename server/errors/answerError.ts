@@ -1,9 +1,14 @@
 import type { ErrorRequestHandler, RequestHandler } from "express";
-import { ConnectionAcquireTimeoutError, ConnectionError, UniqueConstraintError } from "sequelize";
+import { ConnectionAcquireTimeoutError, ConnectionError, DatabaseError, UniqueConstraintError } from "sequelize";
 import { type Problem, type ProblemName, problems, problemType } from "#shared/problems";
 import { AppError } from "./AppError";
 
 type Thrown = { type?: string; status?: number; statusCode?: number };
+
+/** SQLSTATE of a statement that waited too long, of a lost lock, and of what was tried again in vain: come back later. */
+const busy = new Set(["57014", "55P03", "40001", "40P01"]);
+const sqlState = (error: unknown) =>
+  error instanceof DatabaseError ? (error.parent as Error & { code?: string }).code : undefined;
 
 /** Errors of libraries, known by class or code, as our own. */
 function named(error: unknown): AppError {
@@ -12,6 +17,7 @@ function named(error: unknown): AppError {
   if (error instanceof ConnectionAcquireTimeoutError || error instanceof ConnectionError) {
     return new AppError("unavailable", undefined, { cause: error });
   }
+  if (busy.has(sqlState(error) ?? "")) return new AppError("unavailable", undefined, { cause: error });
   const { type, status, statusCode } = (error ?? {}) as Thrown;
   const byType: Record<string, ProblemName> = {
     "entity.parse.failed": "malformed-request",
