@@ -29,7 +29,8 @@ export function psql({ port, passwords }, sql) {
 }
 
 /**
- * Makes a database that belongs to an ordinary role of the server's own, if it is not there. Gives its address.
+ * Makes a database that belongs to an ordinary role of the server's own, if it is not there. Gives its
+ * address, and what tells it from any other that ever had its name.
  * @param {Cluster} cluster
  * @param {string} name letters, digits and underscores
  */
@@ -41,5 +42,9 @@ export async function keepDatabase(cluster, name) {
   if (!(await psql(cluster, `SELECT 1 FROM pg_database WHERE datname = '${name}';`))) {
     await psql(cluster, `CREATE DATABASE "${name}" OWNER idlewright;`);
   }
-  return urlOf(cluster, "idlewright", name);
+  const identity = await psql(
+    cluster,
+    `SELECT system_identifier || '/' || oid FROM pg_control_system(), pg_database WHERE datname = '${name}';`,
+  );
+  return { url: urlOf(cluster, "idlewright", name), identity };
 }

@@ -1,4 +1,6 @@
 import { createHash } from "node:crypto";
+import { existsSync, readFileSync, writeFileSync } from "node:fs";
+import { join } from "node:path";
 import { openCluster } from "./cluster.mjs";
 import { keepDatabase } from "./database.mjs";
 import { LaunchError } from "./LaunchError.mjs";
@@ -38,14 +40,33 @@ export async function demoSecrets() {
  * The database of a demo and the folder of its photos: the given database, or one in our own private cluster.
  * @param {string | undefined} given as DATABASE_URL has it
  * @param {string} suffix
+ * @returns {Promise<{ databaseUrl: string, dataDir: string, identity: string | null, words: string }>} `identity` tells
+ *   a database of our own from one that had its name before it
  */
 export async function openDemoDatabase(given, suffix) {
   if (given) {
     const name = createHash("sha256").update(given).digest("hex").slice(0, 8);
-    return { databaseUrl: given, dataDir: inData(`store-${name}`), words: "the one in DATABASE_URL" };
+    return { databaseUrl: given, dataDir: inData(`store-${name}`), identity: null, words: "the one in DATABASE_URL" };
   }
   const cluster = await openCluster("pg");
-  const databaseUrl = await keepDatabase(cluster, `idlewright${suffix.replace("-", "_")}`);
+  const { url, identity } = await keepDatabase(cluster, `idlewright${suffix.replace("-", "_")}`);
   const words = `PostgreSQL 15 of our own on 127.0.0.1:${cluster.port}`;
-  return { databaseUrl, dataDir: inData(`store${suffix}`), words };
+  return { databaseUrl: url, dataDir: inData(`store${suffix}`), identity, words };
+}
+
+/**
+ * Fills a database unless a note says that the same programs filled the same database before. Nobody else changes one
+ * of our own; one that was given has no identity here and is always looked at.
+ *
+ * @param {string | null} identity
+ * @param {{ build: string, suffix: string }} settings
+ * @param {() => Promise<void>} fill
+ */
+export async function fillOnce(identity, { build, suffix }, fill) {
+  const note = inData(`filled${suffix}`);
+  const programs = ["migrateMain", "seedMain"].map((name) => readFileSync(join(build, `server/${name}.js`)));
+  const mark = `${identity} ${createHash("sha256").update(Buffer.concat(programs)).digest("hex")}`;
+  if (identity && existsSync(note) && readFileSync(note, "utf8") === mark) return;
+  await fill();
+  if (identity) writeFileSync(note, mark);
 }

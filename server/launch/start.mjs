@@ -1,6 +1,6 @@
 import { keepBuild } from "./build.mjs";
 import { installDebianPackages } from "./debian.mjs";
-import { demoSecrets, openDemoDatabase, takePlace } from "./demo.mjs";
+import { demoSecrets, fillOnce, openDemoDatabase, takePlace } from "./demo.mjs";
 import { describeSite } from "./describeSite.mjs";
 import { LaunchError } from "./LaunchError.mjs";
 import { checkNodeVersion } from "./nodeVersion.mjs";
@@ -53,15 +53,19 @@ async function bringUp() {
     return fresh ? "client and server built" : "nothing changed";
   });
 
+  let identity = /** @type {string | null} */ (null);
   let place = { databaseUrl: "", dataDir: "" };
   await step("database", async () => {
-    const { words, ...opened } = await openDemoDatabase(DATABASE_URL, suffix);
+    const { words, identity: found, ...opened } = await openDemoDatabase(DATABASE_URL, suffix);
+    identity = found;
     place = opened;
     return words;
   });
   const settings = { ...place, build, secrets, suffix, host: HOST, publicUrl: PUBLIC_URL };
-  await step("schema", () => migrateSite(settings));
-  await step("demo data", () => seedSite({ ...settings, port: 0 }));
+  await fillOnce(identity, settings, async () => {
+    await step("schema", () => migrateSite(settings));
+    await step("demo data", () => seedSite({ ...settings, port: 0 }));
+  });
 
   await step("server", async () => {
     const site = await startOnPort(settings);

@@ -50,8 +50,9 @@ describe("a private PostgreSQL cluster", { timeout: 60_000 }, () => {
   });
 
   it("gives the server a database of its own role, which is no superuser and makes no databases", async () => {
-    const url = await keepDatabase(cluster, "shop");
-    expect(await keepDatabase(cluster, "shop")).toBe(url);
+    const { url, identity } = await keepDatabase(cluster, "shop");
+    expect(await keepDatabase(cluster, "shop")).toEqual({ url, identity });
+    expect((await keepDatabase(cluster, "other")).identity).not.toBe(identity);
     const sql = "SELECT rolsuper, rolcreatedb, rolcreaterole FROM pg_roles WHERE rolname = current_user";
     expect(await answer(url, sql)).toEqual({ rolsuper: false, rolcreatedb: false, rolcreaterole: false });
     await answer(url, "CREATE EXTENSION IF NOT EXISTS pg_trgm");
