@@ -71,7 +71,7 @@ export function AsNewLine({ values, shown }: { values: NeedValues; shown: readon
             {dimensionWords[name]} <Figure estimate={estimate} unit={unit} />
           </p>
         ))}
-      <Disclosure summary="why">
+      <Disclosure summary="why" className="max-w-full open:w-full">
         <ul className="grid max-w-prose gap-4 pb-2">
           {lines.map(({ name, estimate }) => (
             <li key={name}>

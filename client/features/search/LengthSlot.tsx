@@ -33,7 +33,7 @@ export function LengthSlot({ name, text, unit, problem, example, onText, onRemov
   const echo = echoBeside(text, unit);
   const width = { "--slot-width": `${Math.max(text.length, example.length) + 1}ch` } as CSSProperties;
   return (
-    <span className="inline-flex flex-col align-baseline whitespace-nowrap">
+    <span className="inline-flex max-w-full flex-col align-baseline">
       <span>
         <label htmlFor={id} className="text-soft">
           <DimensionLabel name={name} />{" "}

@@ -200,9 +200,11 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
         {aside}
         <div className={`strip-notes ${look === "compact" ? "hidden" : ""}`}>
           {isWritten ? (
-            <Suspense fallback={<p>&nbsp;</p>}>
-              <AsNewLine values={values} shown={shown} />
-            </Suspense>
+            <div className="min-h-7">
+              <Suspense fallback={null}>
+                <AsNewLine values={values} shown={shown} />
+              </Suspense>
+            </div>
           ) : (
             <p className="text-soft">
               Write sizes as you read them: 44.1, 44,1 mm, 1.736 in, 1-47/64, 750 thou. Wear is reckoned in for you.
