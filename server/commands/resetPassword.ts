@@ -26,16 +26,17 @@ export function requestPasswordReset(email: string, publicUrl: string, now: Date
   });
 }
 
-/** Sets a new password by the link of a mail, ends every session, and has the owner told. */
-export async function resetPassword({ token, newPassword }: ResetPassword, now: Date): Promise<void> {
+/** Sets a new password by the link of a mail, ends every session, has the owner told, and gives who it was. */
+export async function resetPassword({ token, newPassword }: ResetPassword, now: Date): Promise<User> {
   const passwordHash = await hashPassword(newPassword);
-  await inTransaction(async (transaction) => {
+  return inTransaction(async (transaction) => {
     const userId = await spendToken(token, "reset-password", now, transaction);
     const user = await User.findByPk(userId, { transaction, rejectOnEmpty: true });
     refuseGuessable(newPassword, [user.displayName, ...user.email.split("@")], "#/newPassword");
     await setPassword(user, passwordHash, { now, keepSession: null, transaction });
     // Whoever reads the mail holds the address.
     if (!user.emailVerifiedAt) await user.update({ emailVerifiedAt: now }, { transaction });
+    return user;
   });
 }
 

@@ -5,7 +5,22 @@ import { AppError } from "../errors/AppError";
 import type { Actor } from "../policies/Actor";
 import type { Endpoint, Limit } from "./endpoint";
 
-const everyday: Limit = { name: "everyday", points: 600, perSeconds: 60 };
+/** One person's calls; an address may stand for many people behind it. */
+const everyday = {
+  user: { name: "everyday-user", points: 120, perSeconds: 60 },
+  address: { name: "everyday-address", points: 600, perSeconds: 60 },
+} satisfies Record<string, Limit>;
+
+const told = ({ consumedPoints, msBeforeNext }: RateLimiterRes) => ({
+  used: consumedPoints,
+  seconds: msBeforeNext > 0 ? Math.ceil(msBeforeNext / 1000) : 0,
+});
+
+/** The refusal of a limit that is used up. */
+export const tooOften = (seconds: number): AppError =>
+  new AppError("too-often", `Too many tries. Wait ${Math.max(1, seconds)} seconds and try again.`, {
+    retryAfterSeconds: Math.max(1, seconds),
+  });
 
 /**
  * Limits that hold across processes, counted in PostgreSQL.
@@ -23,25 +38,42 @@ export class RateLimits {
   ) {}
 
   async spend(endpoint: Endpoint, actor: Actor | null, req: Request): Promise<void> {
-    await this.take(endpoint.limit ?? everyday, actor ? `user:${actor.id}` : `address:${req.ip}`);
+    const usual = actor ? everyday.user : everyday.address;
+    await this.take(endpoint.limit ?? usual, actor ? `user:${actor.id}` : `address:${req.ip}`);
   }
 
   /** Counts one use of a limit under a key; throws when it is used up. */
   async take(limit: Limit, key: string): Promise<void> {
+    const { used, seconds } = await this.count(limit, key);
+    if (this.isOver(limit, used)) throw tooOften(seconds);
+  }
+
+  /** Whether so many uses are more than the limit allows. */
+  isOver(limit: Limit, used: number): boolean {
+    return used > this.#pointsOf(limit);
+  }
+
+  /** Counts one use, and gives how many there were and the seconds until they are forgotten (0: not by themselves). */
+  async count(limit: Limit, key: string): Promise<{ used: number; seconds: number }> {
     try {
-      await this.#limiter(limit).consume(key);
+      return told(await this.#limiter(limit).consume(key));
     } catch (error) {
-      if (!(error instanceof RateLimiterRes)) return;
-      const seconds = Math.max(1, Math.ceil(error.msBeforeNext / 1000));
-      throw new AppError("too-often", `Too many tries. Wait ${seconds} seconds and try again.`, {
-        retryAfterSeconds: seconds,
-      });
+      return error instanceof RateLimiterRes ? told(error) : { used: 0, seconds: 0 };
     }
+  }
+
+  /** Refuses a key for some time, whatever was counted. */
+  async block(limit: Limit, key: string, seconds: number): Promise<void> {
+    await this.#limiter(limit).block(key, seconds);
   }
 
   /** Forgets what was counted under a key, for example after a right password. */
   async forget(limit: Limit, key: string): Promise<void> {
     await this.#limiter(limit).delete(key);
+  }
+
+  #pointsOf({ points }: Limit): number {
+    return Math.ceil(points * this.factor);
   }
 
   #limiter(limit: Limit): RateLimiterPostgres {
@@ -53,7 +85,7 @@ export class RateLimits {
       tableName: "rate_limits",
       tableCreated: true,
       keyPrefix: limit.name,
-      points: Math.ceil(limit.points * this.factor),
+      points: this.#pointsOf(limit),
       duration: limit.perSeconds,
     });
     this.#limiters.set(limit.name, limiter);

@@ -147,7 +147,10 @@ export function authRoutes({ config, limits, logger }: Services): Endpoint[] {
         body: ResetPassword,
         limit: signInLimits.resetPerAddress,
       },
-      ({ body, now }) => resetPassword(body, now),
+      async ({ body, now }) => {
+        const { email } = await resetPassword(body, now);
+        await forgiveAccount(limits, email);
+      },
     ),
     endpoint(
       {
