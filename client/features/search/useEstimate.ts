@@ -18,12 +18,17 @@ export function useEstimate() {
 
   useEffect(() => {
     if (held === null) return;
+    // Held until the address has caught up, so that the marker never springs back for a moment.
     const timer = setTimeout(() => {
-      setParams(withParam(latest.current, "estimateMm", held.toFixed(3)), { replace: true });
-      setHeld(null);
+      const rest = held.toFixed(3);
+      if (latest.current.get("estimateMm") === rest) setHeld(null);
+      else setParams(withParam(latest.current, "estimateMm", rest), { replace: true });
     }, pause);
     return () => clearTimeout(timer);
   }, [held, setParams]);
+  useEffect(() => {
+    setHeld((now) => (now !== null && inAddress !== null && now.toFixed(3) === inAddress.toFixed(3) ? null : now));
+  }, [inAddress]);
 
   return {
     movedTo: held ?? inAddress,
