@@ -24,6 +24,7 @@ export const roundedSize = (mm: number, unit: SizeUnit): string =>
 export function statedNumbers(nominalMm: number, plusMinusMm: number, unit: SizeUnit): [string, string] {
   if (unit === "in")
     return [roundDecimal(nominalMm / perInch, 3), roundDecimal(plusMinusMm / perInch, plusMinusMm < 0.03 ? 4 : 3)];
-  const decimals = Math.max(1, decimalsOf(nominalMm, 3), decimalsOf(plusMinusMm, 3));
-  return [roundDecimal(nominalMm, decimals), roundDecimal(plusMinusMm, Math.max(1, decimalsOf(plusMinusMm, 3)))];
+  // A tolerance worked out as a share of a long belt is not stated to the micrometre.
+  const tolerance = Math.max(1, decimalsOf(plusMinusMm, plusMinusMm >= 1 ? 1 : plusMinusMm >= 0.1 ? 2 : 3));
+  return [roundDecimal(nominalMm, Math.max(tolerance, decimalsOf(nominalMm, 3))), roundDecimal(plusMinusMm, tolerance)];
 }

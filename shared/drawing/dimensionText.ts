@@ -22,7 +22,13 @@ export function dimensionText(size: StatedSize, unit: LengthUnit): { nominal: st
 
 function mmDecimals(nominalMm: number, plusMinusMm: number | undefined): number {
   const least = nominalMm < 100 ? 1 : 0;
-  return Math.max(least, decimalsOf(nominalMm), plusMinusMm === undefined ? 0 : decimalsOf(plusMinusMm));
+  return Math.max(least, decimalsOf(nominalMm), plusMinusMm === undefined ? 0 : toleranceDecimals(plusMinusMm));
+}
+
+/** Decimals that a tolerance is worth: one worked out as a share of a long belt is not stated to the micrometre. */
+function toleranceDecimals(plusMinusMm: number): number {
+  const most = plusMinusMm >= 1 ? 1 : plusMinusMm >= 0.1 ? 2 : 3;
+  return Math.min(most, decimalsOf(plusMinusMm));
 }
 
 function inchDecimals(plusMinusMm: number | undefined): number {
