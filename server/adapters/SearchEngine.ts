@@ -1,4 +1,5 @@
 import type { DimensionName, PartKind } from "#shared/domain/partKinds";
+import type { Statement } from "../db/Statement";
 
 /**
  * The window of one dimension, in micrometres: an item may be in it where
@@ -21,10 +22,10 @@ export type CandidateQuery = {
 };
 
 /**
- * Measured items that may fit: parts of their own, or lines of kits. By words alone parts, measured or not.
- * Each once, in no order.
+ * Measured items that may fit (parts of their own, or lines of kits), or by words alone parts, measured or not: as a SELECT
+ * of their ids, each once, to be joined in the statement given.
  */
-export type Candidates = { itemIds: string[]; partIds: string[] };
+export type Candidates = { of: "items" | "parts"; select: (statement: Statement) => string };
 
 /**
  * Finds the few items worth assessing among all that are published. What it gives may be more than what is published or

@@ -7,6 +7,7 @@ import { orders } from "./migrations/0005-orders";
 import { ledger } from "./migrations/0006-ledger";
 import { mails } from "./migrations/0007-mails";
 import { searchVocabulary } from "./migrations/0008-search-vocabulary";
+import { itemSizes } from "./migrations/0009-item-sizes";
 
 /** Every migration, oldest first. */
 export const migrations: readonly Migration[] = [
@@ -18,4 +19,5 @@ export const migrations: readonly Migration[] = [
   ledger,
   mails,
   searchVocabulary,
+  itemSizes,
 ];

@@ -20,6 +20,11 @@ const settings = {
 /** What is told of a failure that was got round. */
 export type Warns = { warn(fields: { err: Error }, words: string): void };
 
+const listed = (of: Candidates["of"], ids: readonly string[]): Candidates => ({
+  of,
+  select: (statement) => `SELECT unnest(${statement.param(ids)}::uuid[]) AS id`,
+});
+
 /** Waits for a write to be done. Errors: what the service says went wrong. */
 async function done(task: EnqueuedTaskPromise): Promise<void> {
   const { status, error } = await task.waitTask();
@@ -96,7 +101,7 @@ export class MeilisearchEngine implements SearchEngine {
   async #search({ sought, words, limit }: CandidateQuery): Promise<Candidates> {
     const typed = words === null ? null : soughtWords(words).join(" ");
     // Nothing to look for is everything to the service; here it is nothing.
-    if (typed === "") return { itemIds: [], partIds: [] };
+    if (typed === "") return listed("parts", []);
     const { hits } = await this.#index.search(typed, {
       filter: meiliFilter(sought),
       matchingStrategy: "all",
@@ -104,7 +109,13 @@ export class MeilisearchEngine implements SearchEngine {
       attributesToRetrieve: ["item", "part"],
     });
     return sought.length > 0
-      ? { itemIds: hits.flatMap(({ item }) => item ?? []), partIds: [] }
-      : { itemIds: [], partIds: hits.map(({ part }) => part) };
+      ? listed(
+          "items",
+          hits.flatMap(({ item }) => item ?? []),
+        )
+      : listed(
+          "parts",
+          hits.map(({ part }) => part),
+        );
   }
 }

@@ -17,9 +17,10 @@ const learnSql = `
 export class PostgresSearchEngine implements SearchEngine {
   async candidates({ sought, words, limit }: CandidateQuery): Promise<Candidates> {
     const tsquery = words === null ? null : await this.#tsqueryOf(words);
-    const { sql, bind } = candidateSql({ sought, tsquery, limit });
-    const ids = (await select<{ id: string }>(sql, bind)).map(({ id }) => id);
-    return sought.length > 0 ? { itemIds: ids, partIds: [] } : { itemIds: [], partIds: ids };
+    return {
+      of: sought.length > 0 ? "items" : "parts",
+      select: (statement) => candidateSql({ sought, tsquery, limit }, statement),
+    };
   }
 
   async index(partIds: readonly string[]): Promise<void> {

@@ -43,15 +43,13 @@ async function loadCandidates(
   const words = need.q;
   const along = railSizeOf(need);
   const shown = sought[0];
-  const [{ itemIds, partIds }, neighbours] = await Promise.all([
+  const [candidates, neighbours] = await Promise.all([
     engine.candidates({ sought, words, limit: mostCandidates }),
-    along && shown ? neighboursOf(shown, along.dimension, { offer, material, words }) : [],
+    along && shown ? neighboursOf(shown, along.dimension, { offer, material, words }) : null,
   ]);
-  const [items, parts] = await Promise.all([
-    loadItems([...new Set([...itemIds, ...neighbours])], { dimensions: dimensionsIn(targets), shipTo }),
-    loadParts(partIds, shipTo),
-  ]);
-  return [...items, ...parts];
+  if (candidates.of === "parts") return loadParts(candidates.select, shipTo);
+  const selects = neighbours ? [candidates.select, neighbours] : [candidates.select];
+  return loadItems(selects, { dimensions: dimensionsIn(targets), shipTo });
 }
 
 /** Rows of results for these candidates, by the id of the part. */

@@ -27,7 +27,8 @@ export async function servicePointCounts(engine: SearchEngine, family: FamilyReg
     sought.length > 0 ? engine.candidates({ sought, words: null, limit: mostCandidates }) : null,
   ]);
   // Postage plays no part in counting.
-  const rows = await loadItems(candidates?.itemIds ?? [], { dimensions: dimensionsIn(targets), shipTo: "" });
+  const asked = { dimensions: dimensionsIn(targets), shipTo: "" };
+  const rows = candidates ? await loadItems([candidates.select], asked) : [];
   const parts = new Map(family.points.map(({ id }) => [id, new Set<string>()]));
   for (const { point, part } of claimed) parts.get(point)?.add(part);
   for (const target of targets) {
