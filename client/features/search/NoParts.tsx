@@ -23,6 +23,7 @@ export function hardestBound({ nearMisses }: Pick<SearchAnswer, "nearMisses">): 
 export function NoParts({ answer }: { answer: SearchAnswer }) {
   const [params] = useSearchParams();
   const { need } = answer;
+  const isMeasured = need.dimensions.length > 0;
   const filters = appliedFilters(params);
   const wider = [
     ...filters.map(({ name, words }) => ({ to: withParam(params, name, ""), words: `not only ${words}` })),
@@ -37,7 +38,12 @@ export function NoParts({ answer }: { answer: SearchAnswer }) {
   ];
   return (
     <Notice title="No part fits this as it stands">
-      <p>{hardestBound(answer) ?? "Nothing on offer comes near these sizes."}</p>
+      <p>
+        {hardestBound(answer) ??
+          (isMeasured
+            ? "Nothing on offer comes near these sizes."
+            : "Nothing on offer has these words, or words one letter away from them.")}
+      </p>
       {wider.length > 0 && (
         <>
           <p className="text-soft">Look wider:</p>
@@ -53,8 +59,9 @@ export function NoParts({ answer }: { answer: SearchAnswer }) {
         </>
       )}
       <p className="text-soft">
-        Measure once more if you can: three readings around a wheel, rubber hardly touched, written with all their
-        digits.
+        {isMeasured
+          ? "Measure once more if you can: three readings around a wheel, rubber hardly touched, written with all their digits."
+          : "A size finds more than words do: measure what is left, and write it in the sentence above."}
       </p>
     </Notice>
   );

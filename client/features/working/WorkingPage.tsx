@@ -34,9 +34,10 @@ export function WorkingPage() {
 
       <RuledHeading className="mt-6">1. What you measured</RuledHeading>
       <p className="max-w-prose">
-        A length is read as people write it, in millimetres, inches, fractions or thou, and shown back to you. How many
-        digits you wrote tells how finely you read. The instrument’s permissible error, its scale, the scatter of
-        several readings and the give of rubber under the jaws together make the uncertainty (JCGM 100).
+        A length is read as people write it, in millimetres, inches, fractions or thou, and shown back to you. A
+        fraction counts as rounded to its last part, a decimal as what the instrument showed. The instrument’s
+        permissible error, its scale, the scatter of several readings and the give of rubber under the jaws together
+        make the uncertainty (JCGM 100).
       </p>
       <Instruments />
 
