@@ -117,7 +117,8 @@ export async function seedListings(points: readonly SeededPoint[], transaction: 
         hardnessShoreA: hardness[material] ? pick(hardness[material], name, "hardness") : null,
         offerType,
         priceMinor: Math.round((basePrice[kind] * workshop.priceFactor * (0.85 + dice(name, "price") * 0.4)) / 10) * 10,
-        stockOnHand: offerType === "stocked" ? between(0, 24, 1, name, "stock") : null,
+        stockOnHand:
+          offerType === "stocked" ? between(point.familySlug === "tavrin-c4" ? 6 : 0, 24, 1, name, "stock") : null,
         leadDays: offerType === "stocked" ? 0 : between(5, 21, 1, name, "lead"),
         madeToSize: offerType === "made-to-order",
         coreTerms: remoulds
