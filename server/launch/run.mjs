@@ -1,6 +1,6 @@
 import { spawn } from "node:child_process";
 import { closeSync, mkdirSync, openSync, readFileSync } from "node:fs";
-import { dirname } from "node:path";
+import { basename, dirname } from "node:path";
 import { LaunchError } from "./LaunchError.mjs";
 import { root } from "./paths.mjs";
 import { onStop } from "./stops.mjs";
@@ -19,7 +19,8 @@ export async function run(command, args, { log, env = process.env, cwd = root })
   const out = openSync(log, "w");
   try {
     const result = await ended(spawn(command, args, { cwd, env, stdio: ["ignore", out, out] }));
-    if (result !== "0") throw new LaunchError(`${command} ${args[0] ?? ""} failed (${result}).\n${lastLines(log)}`);
+    const name = [command, ...args.slice(0, 1)].map((word) => basename(word)).join(" ");
+    if (result !== "0") throw new LaunchError(`${name} failed (${result}).\n${lastLines(log)}`);
   } finally {
     closeSync(out);
   }
