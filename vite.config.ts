@@ -14,6 +14,10 @@ export default defineConfig({
     sourcemap: false,
   },
   test: {
+    // How long a test waits for what must come: generous, since it passes as soon as it has come.
+    expect: { poll: { timeout: 20_000 } },
+    testTimeout: 30_000,
+    hookTimeout: 60_000,
     projects: [
       {
         extends: true,
@@ -30,7 +34,6 @@ export default defineConfig({
           include: ["tests/client/**/*.test.{ts,tsx}"],
           environment: "jsdom",
           setupFiles: ["tests/support/dom.ts"],
-          testTimeout: 20_000,
         },
       },
       {
@@ -40,8 +43,7 @@ export default defineConfig({
           include: ["tests/server/**/*.test.ts"],
           environment: "node",
           globalSetup: ["tests/support/globalDatabase.ts"],
-          testTimeout: 20_000,
-          hookTimeout: 60_000,
+          testTimeout: 60_000,
         },
       },
       {
@@ -51,8 +53,8 @@ export default defineConfig({
           include: ["tests/e2e/**/*.test.ts"],
           environment: "node",
           globalSetup: ["tests/support/globalSite.ts"],
-          testTimeout: 120_000,
-          hookTimeout: 120_000,
+          testTimeout: 300_000,
+          hookTimeout: 300_000,
           fileParallelism: false,
         },
       },

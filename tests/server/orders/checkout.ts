@@ -80,7 +80,7 @@ export async function loseTheAnswer<Answer>(
   control.trouble({ kind: "cut-after-commit", on });
   const answer = Promise.resolve(act());
   // Held, it is past the check for failures, which then meet the tries that follow alone.
-  await expect.poll(() => control.heldRequests(), { timeout: 15_000 }).toBe(1);
+  await expect.poll(() => control.heldRequests()).toBe(1);
   control.trouble({ kind: "fail", times: 2, on });
   control.releaseRequests();
   return answer;
