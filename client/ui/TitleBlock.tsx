@@ -5,11 +5,11 @@ export type TitleCell = { label: string; value: ReactNode /** The sum of the oth
 /** Figures in ruled cells, as in the title block of a drawing. */
 export function TitleBlock({ cells, className = "" }: { cells: readonly TitleCell[]; className?: string }) {
   return (
-    <dl className={`grid grid-cols-2 gap-px border border-rule bg-rule sm:flex ${className}`}>
+    <dl className={`grid grid-cols-2 overflow-hidden border border-rule sm:flex print:break-inside-avoid ${className}`}>
       {cells.map(({ label, value, whole }) => (
         <div
           key={label}
-          className={`flex flex-col bg-ground px-3 py-2 last:odd:col-span-2 sm:grow print:bg-transparent ${whole ? "sm:min-w-36 sm:text-right" : "sm:basis-0"}`}
+          className={`-mr-px -mb-px flex flex-col border-r border-b border-rule px-3 py-2 last:odd:col-span-2 sm:grow ${whole ? "sm:min-w-36 sm:text-right" : "sm:basis-0"}`}
         >
           <dt className="text-small text-soft">{label}</dt>
           <dd className={whole ? "text-step1 font-bold" : ""}>{value}</dd>
