@@ -45,7 +45,7 @@ export function OrderStatus({ order, isWaiting, waitedInVain, left, onLookAgain 
           <Link to="/basket" className="inline-block min-h-6">
             Look at the basket
           </Link>
-          : what was not paid still lies there.
+          : what was not paid may still lie there.
         </p>
       )}
     </section>

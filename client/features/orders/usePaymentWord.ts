@@ -1,6 +1,7 @@
-import { useQuery } from "@tanstack/react-query";
+import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useEffect, useRef, useState } from "react";
 import { announce } from "../../lib/announcements";
+import { basketKeys } from "../../lib/basket";
 import { orderQuery } from "../../lib/orders";
 
 /** How often the order is looked at while the payment service's word is awaited, and for how long, ms. */
@@ -14,6 +15,7 @@ const glanceEvery = 30_000;
  * The page decides nothing: an order is paid when the payment service has said so to the server.
  */
 export function usePaymentWord(id: string, cameBack: boolean) {
+  const queryClient = useQueryClient();
   const [since, setSince] = useState(() => Date.now());
   const [isOver, setOver] = useState(false);
   const query = useQuery({
@@ -34,9 +36,13 @@ export function usePaymentWord(id: string, cameBack: boolean) {
 
   const before = useRef(state);
   useEffect(() => {
-    if (before.current === "awaiting-payment" && state === "paid") announce("Paid");
+    const isNews = before.current === "awaiting-payment" && state === "paid";
     before.current = state;
-  }, [state]);
+    if (!isNews) return;
+    announce("Paid");
+    // What was paid has left the basket.
+    void queryClient.invalidateQueries({ queryKey: basketKeys.all });
+  }, [state, queryClient]);
 
   const lookAgain = () => {
     setSince(Date.now());

@@ -13,11 +13,12 @@ export const comparedBox = { width: 120, height: 108 };
 /**
  * The one scale of a list of parts of all kinds, px to the mm: the largest at which every part fits its box. Loops of belts
  * do not count where there is anything else: they would dwarf it, and are drawn at a stated fraction instead.
+ * With nothing to draw the scale is 0.
  */
 export function comparedScale(parts: readonly Drawable[]): ComparedScale {
   const others = parts.filter(({ kind }) => !isBelt(kind));
   const belts = parts.filter(({ kind }) => isBelt(kind));
-  const { pxPerMm = 1 } = sharedScale(others.length > 0 ? others : belts, comparedBox);
+  const { pxPerMm = 0 } = sharedScale(others.length > 0 ? others : belts, comparedBox);
   const { sectionPxPerMm } = sharedScale(belts, comparedBox);
   return { pxPerMm, ...(sectionPxPerMm === undefined ? {} : { sectionPxPerMm }) };
 }

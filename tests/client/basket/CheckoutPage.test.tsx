@@ -1,4 +1,4 @@
-import { screen, waitFor, within } from "@testing-library/react";
+import { act, screen, waitFor, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { beforeEach, describe, expect, it, vi } from "vitest";
 import { leaveTo } from "../../../client/lib/leaveTo";
@@ -49,6 +49,9 @@ describe("the checkout", () => {
     await userEvent.click(await orderButton());
     const summary = (await screen.findByText("There is a problem")).closest("[role=alert]") as HTMLElement;
     await waitFor(() => expect(summary).toHaveFocus());
+    // The form's own wish to focus the first field would come with the next timer.
+    await act(() => new Promise<void>((done) => setTimeout(done)));
+    expect(summary).toHaveFocus();
     const messages = within(summary)
       .getAllByRole("link")
       .map((link) => link.textContent);
@@ -135,13 +138,18 @@ describe("the checkout", () => {
     let state: "awaiting-payment" | "paid" = "awaiting-payment";
     const calls = stubApi(routes({ [`GET /orders/${placed.orderId}`]: () => ok(orderOf({ state })) }));
     const order = async (times: number) => {
-      const view = show();
       await userEvent.click(await orderButton());
       await waitFor(() => expect(leaveTo).toHaveBeenCalledTimes(times));
-      view.unmount();
     };
+    const first = show();
     await order(1);
+    first.unmount();
+    const second = show();
     await order(2);
+    second.unmount();
+    show();
+    // It is paid, in another tab, after this page has seen it wait.
+    await screen.findByText("Order 26-10007 waits for payment");
     state = "paid";
     await order(3);
     const [a, b, c] = ordersOf(calls).map(({ checkoutKey }) => checkoutKey);

@@ -77,7 +77,8 @@ describe("an order that waits for payment", () => {
   it("looks every two seconds for the payment's word, and says when it has come", async () => {
     let order = orderOf();
     const calls = stubApi(routes(() => order));
-    show("?paid=1");
+    const { queryClient } = show("?paid=1");
+    queryClient.setQueryData(["basket", "DE"], {});
     expect(await screen.findByText("Waiting for the payment service’s word")).toBeVisible();
     expect(screen.queryByRole("button", { name: "Pay now" })).toBeNull();
     const looks = () => calls.filter(({ path }) => path === `/orders/${id}`).length;
@@ -91,6 +92,7 @@ describe("an order that waits for payment", () => {
     await pass(2_050);
     expect(status().getByText("Paid")).toBeVisible();
     expect(status().getByRole("status")).toHaveTextContent("Each workshop was told");
+    expect(queryClient.getQueryState(["basket", "DE"])?.isInvalidated).toBe(true);
     const after = looks();
     await pass(40_000);
     expect(looks()).toBe(after);

@@ -1,4 +1,4 @@
-import { screen, within } from "@testing-library/react";
+import { screen, waitFor, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { describe, expect, it } from "vitest";
 import type { OrderSummary } from "#shared/schemas/order";
@@ -56,7 +56,8 @@ describe("own orders", () => {
   it("say what to do where there are none", async () => {
     stubApi(routes(() => ok({ items: [], nextCursor: null })));
     renderPage(<OrdersPage />, "/orders");
-    expect(await screen.findByText("You have ordered nothing yet")).toBeVisible();
+    await waitFor(() => expect(screen.queryByText("Fetching your orders")).toBeNull());
+    expect(screen.getByText("You have ordered nothing yet")).toBeVisible();
     expect(screen.getByRole("link", { name: "Measure a part" })).toHaveAttribute("href", "/");
   });
 
