@@ -9,7 +9,11 @@ const empty = { currentPassword: "", newPassword: "" };
 
 export function ChangePasswordForm() {
   const change = useChangePassword();
-  const form = useForm<ChangePassword>({ resolver: zodResolver(ChangePassword), defaultValues: empty });
+  const form = useForm<ChangePassword>({
+    shouldFocusError: false,
+    resolver: zodResolver(ChangePassword),
+    defaultValues: empty,
+  });
   const { errors } = form.formState;
   const onSubmit = async (values: ChangePassword) => {
     await change.mutateAsync(values);

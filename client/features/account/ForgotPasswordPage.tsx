@@ -11,6 +11,7 @@ export function ForgotPasswordPage() {
   useTitle("Set a new password");
   const request = useRequestReset();
   const form = useForm<RequestPasswordReset>({
+    shouldFocusError: false,
     resolver: zodResolver(RequestPasswordReset),
     defaultValues: { email: "" },
   });

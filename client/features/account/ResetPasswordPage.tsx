@@ -17,6 +17,7 @@ export function ResetPasswordPage() {
   const token = useLocation().hash.slice(1);
   const reset = useResetPassword();
   const form = useForm<{ newPassword: string }>({
+    shouldFocusError: false,
     resolver: zodResolver(NewPasswordOnly),
     defaultValues: { newPassword: "" },
   });

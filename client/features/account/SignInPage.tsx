@@ -18,7 +18,11 @@ export function SignInPage() {
   const [search] = useSearchParams();
   const signIn = useSignIn();
   const { data: session } = useQuery(sessionQuery);
-  const form = useForm<SignIn>({ resolver: zodResolver(SignIn), defaultValues: { email: "", password: "" } });
+  const form = useForm<SignIn>({
+    shouldFocusError: false,
+    resolver: zodResolver(SignIn),
+    defaultValues: { email: "", password: "" },
+  });
   const { errors } = form.formState;
 
   const onSubmit = async (values: SignIn) => {

@@ -17,6 +17,7 @@ export function SignUpPage() {
   const signUp = useSignUp();
   const signIn = useSignIn();
   const form = useForm<SignUp>({
+    shouldFocusError: false,
     resolver: zodResolver(SignUp),
     defaultValues: { email: "", password: "", displayName: "" },
   });
