@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { Id, Time } from "./common";
+import { Id } from "./common";
 
 export const roles = ["restorer", "workshop", "administrator"] as const;
 export const Role = z.enum(roles);
@@ -67,12 +67,3 @@ export const ChangePassword = z.object({
   newPassword: NewPassword,
 });
 export type ChangePassword = z.infer<typeof ChangePassword>;
-
-export const OwnSession = z.object({
-  id: z.string(),
-  startedAt: Time,
-  lastSeenAt: Time,
-  current: z.boolean(),
-  device: z.string(),
-});
-export const OwnSessionList = z.object({ items: z.array(OwnSession) });

@@ -84,6 +84,13 @@ describe("problems", () => {
   });
 });
 
+describe("compression", () => {
+  it("makes long answers shorter", async () => {
+    const description = await request(site.url).get("/api/v1/openapi.json").set("Accept-Encoding", "br, gzip");
+    expect(description.headers["content-encoding"]).toBe("br");
+  });
+});
+
 describe("headers", () => {
   it("ASVS 3.4: allow nothing from elsewhere, no framing, no sniffing, and say nothing of the software", async () => {
     const { headers } = await request(site.url).get("/api/v1/auth/session");
