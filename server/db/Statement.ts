@@ -1,12 +1,10 @@
 /** A statement under way: its text comes from this program alone, what was asked for goes in as parameters. */
 export class Statement {
-  readonly bind: Record<string, unknown> = {};
-  #count = 0;
+  readonly values: unknown[] = [];
 
-  /** The name of a new parameter with this value, as it stands in the text. */
+  /** The place of a new parameter with this value, as it stands in the text: `$1`, `$2` and so on. */
   param(value: unknown): string {
-    const name = `p${this.#count++}`;
-    this.bind[name] = value;
-    return `$${name}`;
+    this.values.push(value);
+    return `$${this.values.length}`;
   }
 }

@@ -4,6 +4,7 @@ import type { Material, OfferType } from "#shared/schemas/part";
 import type { Candidates } from "../adapters/SearchEngine";
 import { Statement } from "../db/Statement";
 import { select } from "../db/select";
+import { selectPrepared } from "../db/selectPrepared";
 import { halfWidthOf, nominalOf } from "./windowSql";
 
 /** Price of one piece and its postage in minor units; null where the workshop does not ship there in this currency. */
@@ -80,7 +81,7 @@ export async function loadItems(
     SELECT i.id AS "itemId", i.kit_line_id AS "kitLineId", i.kind, ${partColumns}, ${sizes} AS sizes
     FROM candidates JOIN measured_items i ON i.id = candidates.id JOIN parts p ON p.id = i.part_id
     ${offered(statement.param(shipTo))}`;
-  const rows = await select<RawRow>(sql, statement.bind);
+  const rows = await selectPrepared<RawRow>(sql, statement);
   return rows.map((row) => complete(row, dimensions));
 }
 
@@ -90,7 +91,7 @@ export async function loadParts(give: Candidates["select"], shipTo: string): Pro
   const sql = `
     SELECT NULL AS "itemId", NULL AS "kitLineId", NULL AS kind, ${partColumns}, '{}'::integer[] AS sizes
     FROM (${give(statement)}) candidates JOIN parts p ON p.id = candidates.id ${offered(statement.param(shipTo))}`;
-  const rows = await select<RawRow>(sql, statement.bind);
+  const rows = await selectPrepared<RawRow>(sql, statement);
   return rows.map((row) => complete(row, []));
 }
 

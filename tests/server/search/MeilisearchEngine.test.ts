@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { startMeilisearchFake } from "#fakes/meilisearch/startMeilisearchFake";
 import { connect } from "#server/db/connect";
 import { Statement } from "#server/db/Statement";
-import { select } from "#server/db/select";
+import { selectPrepared } from "#server/db/selectPrepared";
 import { Part } from "#server/models/Part";
 import { MeilisearchEngine } from "#server/search/MeilisearchEngine";
 import { PostgresSearchEngine } from "#server/search/PostgresSearchEngine";
@@ -36,7 +36,7 @@ async function found(engine: MeilisearchEngine): Promise<string[]> {
   const { of, select: give } = await engine.candidates({ sought: [], words: "grey", limit: 10 });
   expect(of).toBe("parts");
   const statement = new Statement();
-  const rows = await select<{ id: string }>(give(statement), statement.bind);
+  const rows = await selectPrepared<{ id: string }>(give(statement), statement);
   return rows.map(({ id }) => id);
 }
 

@@ -1,6 +1,6 @@
+import pg from "pg";
 import request from "supertest";
 import { afterAll, beforeAll, describe, expect, it, vi } from "vitest";
-import { database } from "#server/db/inTransaction";
 import { writeCursor } from "#server/search/searchCursor";
 import { SearchAnswer } from "#shared/schemas/search";
 import { buildPart } from "#tests/support/factories";
@@ -121,7 +121,7 @@ describe("what a search makes of strange words", () => {
 describe("what a search costs", () => {
   it("at most twelve queries, however much it finds", async () => {
     for (let n = 0; n < 30; n++) await buildPart({ title: "Platter idler", sizes: { outsideDiameter: 44, bore: 4 } });
-    const queries = vi.spyOn(database(), "query");
+    const queries = vi.spyOn(pg.Client.prototype, "query");
     const res = await ask(`${wheel}&bore=4.0&family=plain&q=plattre+idler&limit=50`).expect(200);
     const sent = queries.mock.calls.length;
     queries.mockRestore();
