@@ -1,10 +1,10 @@
 import { existsSync } from "node:fs";
 import { join } from "node:path";
-import compression from "compression";
-import express, { type Express, type Request, type Response } from "express";
+import express, { type Express } from "express";
 import { pendingMigrations } from "./db/migrate";
 import { AppError } from "./errors/AppError";
 import { answerError, answerNotFound } from "./errors/answerError";
+import { compressed } from "./http/compressed";
 import { requestLog } from "./http/logger";
 import { mountEndpoints } from "./http/mountEndpoints";
 import { describeInterface } from "./http/openapi";
@@ -15,10 +15,6 @@ import { signedIn } from "./http/signedIn";
 import { endpointsOf } from "./routes/endpointsOf";
 import { webhookRouter } from "./routes/webhooks";
 import type { Services } from "./Services";
-
-/** Compresses what is worth it, but no answer that carries a secret beside words of the asker. */
-const isCompressed = (req: Request, res: Response) =>
-  !req.originalUrl.startsWith("/api/v1/auth/") && compression.filter(req, res);
 
 /** The whole HTTP side: API, health, photos and the built client where `clientDir` has one. */
 export function createApp(services: Services, { clientDir }: { clientDir?: string } = {}): Express {
@@ -31,7 +27,7 @@ export function createApp(services: Services, { clientDir }: { clientDir?: strin
   app.set("query parser", "simple");
 
   app.use(requestLog(logger));
-  app.use(compression({ filter: isCompressed }));
+  app.use(compressed());
   const payOrigin = config.stripe.apiUrl ? new URL(config.stripe.apiUrl).origin : "https://checkout.stripe.com";
   app.use(securityHeaders({ secure: config.secureCookies, payOrigin }));
 
