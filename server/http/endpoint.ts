@@ -9,7 +9,8 @@ type Read<S extends Shape> = S extends z.ZodType ? z.output<S> : undefined;
 /** Who may call: anybody, anybody signed in, or the roles named. What they may see is the policies' affair. */
 export type Access = "anyone" | "signed-in" | readonly Role[];
 
-export type Limit = { name: string; points: number; perSeconds: number };
+/** How many calls in how long, by signed-in user or else by address; `by: "address"` counts everybody by address. */
+export type Limit = { name: string; points: number; perSeconds: number; by?: "address" };
 
 type Definition<A extends Access, P extends Shape, Q extends Shape, B extends Shape, R extends Shape> = {
   method: "get" | "post" | "put" | "patch" | "delete";

@@ -5,19 +5,31 @@ import { AppError } from "../errors/AppError";
 import type { Actor } from "../policies/Actor";
 import { requireOwnPage } from "./csrf";
 import type { Endpoint } from "./endpoint";
+import { plainWords } from "./plainWords";
 import type { RateLimits } from "./rateLimits";
 
 /** JSON pointer (RFC 6901) to where in the request a schema found something wrong. */
 const pointerOf = (path: readonly PropertyKey[]) =>
-  `#/${path.map((step) => String(step).replaceAll("~", "~0").replaceAll("/", "~1")).join("/")}`;
+  `#${path.map((step) => `/${String(step).replaceAll("~", "~0").replaceAll("/", "~1")}`).join("")}`;
+
+/** Where an issue lies; a field that is not known here is named itself. */
+const placesOf = (issue: z.core.$ZodIssue): PropertyKey[][] =>
+  issue.code === "unrecognized_keys" ? issue.keys.map((key) => [...issue.path, key]) : [issue.path];
+
+/** A refusal names at most so many fields, however many are wrong. */
+const mostErrors = 50;
 
 /** What a schema found wrong, as the fields of a 422. */
 export const fieldErrors = (error: z.ZodError, at: readonly string[] = []): FieldError[] =>
-  error.issues.map((issue) => ({ pointer: pointerOf([...at, ...issue.path]), detail: issue.message }));
+  error.issues
+    .flatMap((issue) =>
+      placesOf(issue).map((path) => ({ pointer: pointerOf([...at, ...path]), detail: issue.message })),
+    )
+    .slice(0, mostErrors);
 
 function read(schema: z.ZodType | undefined, input: unknown): unknown {
   if (!schema) return undefined;
-  const result = schema.safeParse(input);
+  const result = schema.safeParse(input, { error: plainWords });
   if (result.success) return result.data;
   throw new AppError("invalid-request", "Some of the request is not valid: see the fields named", {
     errors: fieldErrors(result.error),

@@ -25,7 +25,8 @@ export const tooOften = (seconds: number): AppError =>
 /**
  * Limits that hold across processes, counted in PostgreSQL.
  *
- * Each call is counted under its endpoint's own limit, or the everyday one, by signed-in user or else by address.
+ * Each call is counted under its endpoint's own limit, or the everyday one, by signed-in user or else by address
+ * (by address alone where the limit says so).
  * Errors: `too-often` with the seconds to wait. Where the counter itself fails the call goes on: a limit that is
  * down must not close the shop.
  */
@@ -38,8 +39,8 @@ export class RateLimits {
   ) {}
 
   async spend(endpoint: Endpoint, actor: Actor | null, req: Request): Promise<void> {
-    const usual = actor ? everyday.user : everyday.address;
-    await this.take(endpoint.limit ?? usual, actor ? `user:${actor.id}` : `address:${req.ip}`);
+    const limit: Limit = endpoint.limit ?? (actor ? everyday.user : everyday.address);
+    await this.take(limit, actor && limit.by !== "address" ? `user:${actor.id}` : `address:${req.ip}`);
   }
 
   /** Counts one use of a limit under a key; throws when it is used up. */
