@@ -5,6 +5,7 @@ import { authRoutes } from "./auth";
 import { basketRoutes } from "./basket";
 import { countryRoutes } from "./countries";
 import { familyRoutes } from "./families";
+import { gaugeRoutes } from "./gauges";
 import { orderRoutes } from "./orders";
 import { partRoutes } from "./parts";
 import { searchRoutes } from "./search";
@@ -22,5 +23,6 @@ export function endpointsOf(services: Services): Endpoint[] {
     ...basketRoutes(),
     ...orderRoutes(services),
     ...addressRoutes(),
+    ...gaugeRoutes(),
   ];
 }
