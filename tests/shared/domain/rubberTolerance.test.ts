@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { DomainError } from "#shared/domain/DomainError";
 import { rubberTolerance, type ToleranceClass, toleranceClasses } from "#shared/domain/rubberTolerance";
 import cases from "../../reference/iso3302.json";
+import table from "../../reference/iso3302Table.json";
 
 describe("rubberTolerance", () => {
   const moulded = cases.filter((c) => c.inputs.tolerance_class.startsWith("M"));
@@ -12,6 +13,34 @@ describe("rubberTolerance", () => {
     const dimension = kind === "C" ? "closure" : "fixed";
     const { plusMinusMm } = rubberTolerance(toleranceClass as ToleranceClass, nominal, dimension);
     expect(plusMinusMm).toBeCloseTo(expected.plus_minus_mm, 9);
+  });
+
+  const columns = toleranceClasses.flatMap((name) => [
+    [name, "fixed", `${name}_F`] as const,
+    [name, "closure", `${name}_C`] as const,
+  ]);
+  it.each(columns)(
+    "%s %s: every row of the table, at both its ends, and the percentages over 160 mm",
+    (name, dimension, column) => {
+      const at = table.columns.indexOf(column);
+      for (const row of table.rows) {
+        const [above, upTo] = [row[0]!, row[1]!];
+        for (const nominal of [above + 1e-9, (above + upTo) / 2, upTo]) {
+          expect(rubberTolerance(name, nominal, dimension)).toMatchObject({
+            plusMinusMm: row[at],
+            range: [above, upTo],
+          });
+        }
+      }
+      const percent = table.over_160_pct[column as keyof typeof table.over_160_pct];
+      for (const nominal of [160.001, 200, 1234.5]) {
+        expect(rubberTolerance(name, nominal, dimension).plusMinusMm).toBeCloseTo((nominal * percent) / 100, 9);
+      }
+    },
+  );
+  it("leaves no gap between the rows, from 0 to 160 mm", () => {
+    expect(table.rows.map(([above]) => above)).toEqual([0, ...table.rows.slice(0, -1).map(([, upTo]) => upTo)]);
+    expect(table.rows.at(-1)?.[1]).toBe(160);
   });
 
   it("says which row was used: above the first bound, up to and including the second", () => {
