@@ -1,6 +1,6 @@
 import { type KeyboardEvent, type PointerEvent, useRef } from "react";
+import type { Range } from "../../lib/axisMarks";
 import { roundedSize, type SizeUnit } from "../../lib/formatSize";
-import type { Range } from "./railScale";
 
 type Props = {
   valueMm: number;

@@ -1,13 +1,13 @@
 import { useRef } from "react";
 import type { NeedDimension } from "#shared/schemas/need";
 import type { Rail } from "#shared/schemas/search";
+import { axisMarks } from "../../lib/axisMarks";
 import { roundedSize, type SizeUnit } from "../../lib/formatSize";
 import { Button } from "../../ui/Button";
 import { useOwnWidth } from "../../ui/drawing/useOwnWidth";
 import { RailLabels } from "./RailLabels";
 import { RailSlider } from "./RailSlider";
 import { RailTicks } from "./RailTicks";
-import { axisMarks } from "./railScale";
 import { useRailView } from "./useRailView";
 
 type Props = {

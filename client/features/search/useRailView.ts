@@ -1,6 +1,7 @@
 import { useState } from "react";
 import type { Rail } from "#shared/schemas/search";
-import { type Range, zoomed } from "./railScale";
+import type { Range } from "../../lib/axisMarks";
+import { zoomed } from "./railScale";
 
 type Kept = { needKey: string; known: Range; view: Range };
 const smallestSpan = 0.2;
