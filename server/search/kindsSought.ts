@@ -5,12 +5,12 @@ import { dimensionsOf, dimensionWords, type PartKind, partKinds } from "#shared/
 import type { FieldError } from "#shared/problems";
 import type { NeedQuery } from "#shared/schemas/need";
 import type { FamilyRegister } from "./familyRegister";
-import type { Reading } from "./needDimension";
-import { refused } from "./readLengths";
+import type { WrittenDimension } from "./needDimension";
+import { refused } from "./readSizes";
 
-function checkKind(kind: PartKind, readings: readonly Reading[], { condition }: NeedQuery): void {
+function checkKind(kind: PartKind, sizes: readonly WrittenDimension[], { condition }: NeedQuery): void {
   const errors: FieldError[] = [];
-  for (const { dimension } of readings) {
+  for (const { dimension } of sizes) {
     try {
       traitsOf(kind, dimension);
     } catch (error) {
@@ -31,23 +31,21 @@ function checkKind(kind: PartKind, readings: readonly Reading[], { condition }: 
  */
 export function kindsSought(
   query: NeedQuery,
-  readings: readonly Reading[],
+  sizes: readonly WrittenDimension[],
   family: FamilyRegister | null,
 ): readonly PartKind[] {
   if (query.kind) {
-    checkKind(query.kind, readings, query);
+    checkKind(query.kind, sizes, query);
     return [query.kind];
   }
-  if (!family && readings.length === 0) return [];
+  if (!family && sizes.length === 0) return [];
   const possible = family ? [...new Set(family.points.map(({ kind }) => kind))] : partKinds;
-  const measurable = possible.filter((kind) =>
-    readings.every(({ dimension }) => dimensionsOf(kind).includes(dimension)),
-  );
-  if (measurable.length === 0 && readings.length > 0) {
-    const names = readings.map(({ dimension }) => dimensionWords[dimension]).join(" and ");
+  const measurable = possible.filter((kind) => sizes.every(({ dimension }) => dimensionsOf(kind).includes(dimension)));
+  if (measurable.length === 0 && sizes.length > 0) {
+    const names = sizes.map(({ dimension }) => dimensionWords[dimension]).join(" and ");
     const where = family ? ` at the service points of the ${family.name}` : "";
     const detail = `No kind of part${where} is measured by ${names}. Leave one out or choose the kind.`;
-    throw refused(readings.map(({ dimension }) => ({ pointer: `#/${dimension}`, detail })));
+    throw refused(sizes.map(({ dimension }) => ({ pointer: `#/${dimension}`, detail })));
   }
   const kinds = measurable.filter((kind) => conditionProblem(kind, query.condition) === undefined);
   if (kinds.length === 0 && measurable.length > 0) {

@@ -1,14 +1,15 @@
 import { type AcceptedBand, defaultBand } from "#shared/domain/acceptedBands";
-import { estimateAsNew } from "#shared/domain/asNew";
 import type { Condition } from "#shared/domain/conditions";
 import type { Instrument } from "#shared/domain/instruments";
 import { formatLength } from "#shared/domain/length";
+import type { WrittenSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionWords, type PartKind } from "#shared/domain/partKinds";
+import { sizeAsNew } from "#shared/domain/sizeAsNew";
 import type { NeedDimension } from "#shared/schemas/need";
 import type { RegisterSize } from "./familyRegister";
 
 /** A size as it was written, and what was understood. */
-export type Reading = { dimension: DimensionName; text: string; mm: number; roundedToMm: number; echo: string };
+export type WrittenDimension = { dimension: DimensionName; text: string; size: WrittenSize };
 
 /** Whose register is used, for the words. */
 export type RegisterOf = { pointName: string; familyName: string };
@@ -28,20 +29,19 @@ export function contradicts({ asNewMm, standardUncertaintyMm }: NeedDimension, {
   return outside > 3 * standardUncertaintyMm + (upperMm - lowerMm);
 }
 
-/** A measured size as new, with the usual band around it. Errors: DomainError as `estimateAsNew`. */
-export function measuredDimension(
+/** A size that was measured or worked out, as new, with the usual band around it. Errors: DomainError as `sizeAsNew`. */
+export function writtenDimension(
   kind: PartKind,
-  reading: Reading,
+  { dimension, text, size }: WrittenDimension,
   { instrument, condition }: { instrument: Instrument; condition: Condition },
 ): NeedDimension {
-  const { dimension, text, mm, roundedToMm: resolutionMm, echo } = reading;
-  const { asNew, basis } = estimateAsNew({ kind, dimension, readingsMm: [mm], resolutionMm, instrument, condition });
+  const { asFoundMm, asNew, basis } = sizeAsNew(size, { kind, dimension, instrument, condition });
   const band = defaultBand(kind, dimension, asNew.valueMm);
   return {
     dimension,
     text,
-    echo,
-    asFoundMm: mm,
+    echo: size.echo,
+    asFoundMm,
     asNewMm: asNew.valueMm,
     standardUncertaintyMm: asNew.standardUncertaintyMm,
     ...band,

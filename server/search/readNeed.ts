@@ -4,8 +4,8 @@ import type { Need, NeedDimension, NeedQuery } from "#shared/schemas/need";
 import { familyRegister } from "./familyRegister";
 import { inOrder, targetsOf } from "./familyTargets";
 import { kindsSought } from "./kindsSought";
-import { measuredDimension, movedDimension, placedDimension, type Reading } from "./needDimension";
-import { readLengths, refused } from "./readLengths";
+import { movedDimension, placedDimension, type WrittenDimension, writtenDimension } from "./needDimension";
+import { readSizes, refused } from "./readSizes";
 import { type Target, targetOf } from "./Target";
 
 /** What is asked for, as shown, and everything that would do. The first target is the one shown. */
@@ -16,13 +16,13 @@ export type ReadNeed = {
   familyId: string | null;
 };
 
-function measure(kind: PartKind, readings: readonly Reading[], query: NeedQuery): NeedDimension[] {
-  return readings.map((reading) => {
+function whenNew(kind: PartKind, sizes: readonly WrittenDimension[], query: NeedQuery): NeedDimension[] {
+  return sizes.map((written) => {
     try {
-      return measuredDimension(kind, reading, query);
+      return writtenDimension(kind, written, query);
     } catch (error) {
       if (!(error instanceof DomainError)) throw error;
-      const pointer = error.field === "condition" ? "#/condition" : `#/${reading.dimension}`;
+      const pointer = error.field === "condition" ? "#/condition" : `#/${written.dimension}`;
       throw refused([{ pointer, detail: error.words }], error);
     }
   });
@@ -36,7 +36,7 @@ function move({ kind, point, dimensions }: Target, toMm: number): Target {
 }
 
 /**
- * What a query asks for: lengths read, as-new sizes with their uncertainty, and the bands that decide.
+ * What a query asks for: sizes read, as-new sizes with their uncertainty, and the bands that decide.
  *
  * Shape:  one target for each kind and service point that would do, the likeliest first. With a family, its register gives
  *         bands and the sizes that were not measured; a register that what was measured speaks against is not used, and
@@ -44,10 +44,10 @@ function move({ kind, point, dimensions }: Target, toMm: number): Target {
  * Errors: `invalid-request` with a pointer for each field that is not clear or not of the kind; `not-found` for a family.
  */
 export async function readNeed(query: NeedQuery, q: string | null = null): Promise<ReadNeed> {
-  const readings = readLengths(query);
+  const sizes = readSizes(query);
   const family = query.family ? await familyRegister(query.family) : null;
-  const kinds = kindsSought(query, readings, family);
-  const found = kinds.flatMap((kind) => targetsOf(kind, measure(kind, readings, query), family));
+  const kinds = kindsSought(query, sizes, family);
+  const found = kinds.flatMap((kind) => targetsOf(kind, whenNew(kind, sizes, query), family));
   const oneKind = kinds.length === 1 ? kinds[0] : undefined;
 
   let targets = found;

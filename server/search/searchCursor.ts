@@ -1,7 +1,7 @@
 import { z } from "zod";
 import type { SearchQuery } from "#shared/schemas/search";
 import { compareKeys, type SortKey } from "./rankCandidates";
-import { refused } from "./readLengths";
+import { refused } from "./readSizes";
 
 const amount = z.number().min(-Number.MAX_SAFE_INTEGER).max(Number.MAX_SAFE_INTEGER);
 const Place = z.discriminatedUnion("sort", [

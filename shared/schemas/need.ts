@@ -1,6 +1,7 @@
 import { z } from "zod";
 import { conditions } from "../domain/conditions";
 import { instruments } from "../domain/instruments";
+import { sizeLimits } from "../domain/parseSize";
 import { dimensionNames } from "../domain/partKinds";
 import { CountryCode, Slug } from "./common";
 import { DimensionName, PartKind } from "./part";
@@ -8,17 +9,21 @@ import { DimensionName, PartKind } from "./part";
 export const Instrument = z.enum(instruments);
 export const Condition = z.enum(conditions);
 
-/** A length as somebody wrote it; what it means is worked out by `parseLength`. */
-export const LengthText = z.string().trim().min(1).max(40, "A length takes at most 40 characters");
+/** A size as somebody wrote it: a reading, several, or one that was worked out. `parseSize` says what it means. */
+const SizeText = z
+  .string()
+  .trim()
+  .min(1)
+  .max(sizeLimits.characters, `A size takes at most ${sizeLimits.characters} characters`);
 
-const lengthByDimension = Object.fromEntries(dimensionNames.map((name) => [name, LengthText.optional()])) as {
-  [name in (typeof dimensionNames)[number]]: z.ZodOptional<typeof LengthText>;
+const sizeByDimension = Object.fromEntries(dimensionNames.map((name) => [name, SizeText.optional()])) as {
+  [name in (typeof dimensionNames)[number]]: z.ZodOptional<typeof SizeText>;
 };
 
 /** What is needed, as it stands in the address bar. */
 export const NeedQuery = z.object({
   kind: PartKind.optional(),
-  ...lengthByDimension,
+  ...sizeByDimension,
   /** The as-new estimate of the primary dimension, moved by hand along the size rail, in mm. */
   estimateMm: z.coerce.number().positive().max(10_000).optional(),
   unit: z.enum(["mm", "in"]).default("mm"),
@@ -35,6 +40,7 @@ export const NeedDimension = z.object({
   /** As typed; null where the size comes from the register of a family. */
   text: z.string().nullable(),
   echo: z.string(),
+  /** Mean of the readings; null where the size was worked out or comes from a register. */
   asFoundMm: z.number().nullable(),
   asNewMm: z.number(),
   standardUncertaintyMm: z.number().nonnegative(),

@@ -64,8 +64,17 @@ async function everyPage(engine: SearchEngine, query: SearchQuery) {
   }
 }
 
-const lengthFor = (dimension: DimensionName) =>
+const readingFor = (dimension: DimensionName) =>
   fc.integer({ min: -40, max: 40 }).map((off) => (middleOf(dimension) * (1 + off / 500)).toFixed(2));
+const lengthFor = (dimension: DimensionName) =>
+  fc.oneof(
+    { arbitrary: readingFor(dimension), weight: 4 },
+    {
+      arbitrary: fc.array(readingFor(dimension), { minLength: 2, maxLength: 3 }).map((readings) => readings.join("; ")),
+      weight: 1,
+    },
+    { arbitrary: readingFor(dimension).map((size) => `${size} ± ${(Number(size) / 100).toFixed(3)}`), weight: 1 },
+  );
 
 const queries = fc.constantFrom(...triedKinds).chain((kind) => {
   const { primary } = kindFacts[kind];

@@ -118,6 +118,57 @@ describe("a search by size", () => {
     expect(placed.need.dimensions[0]).toMatchObject({ text: null, asFoundMm: null, asNewMm: 70 });
   });
 
+  it("takes the mean of several readings, with their scatter and the flat spot that they show", async () => {
+    const part = await buildPart({ sizes: { outsideDiameter: [24, 0.05] } });
+    const answer = await search({ kind: "idler-wheel", outsideDiameter: "24.00; 23.70 mm; 24.00", condition: "sound" });
+    expect(ids(answer)).toEqual([part.id]);
+    const size = answer.need.dimensions[0]!;
+    expect(size).toMatchObject({ text: "24.00; 23.70 mm; 24.00", echo: "3 readings, mean 23.90 mm" });
+    expect(size.asFoundMm).toBeCloseTo(23.9, 12);
+    // A flat only takes away: as new it was as large as at its highest.
+    expect(size.asNewMm).toBeCloseTo(24, 12);
+    expect(size.basis[0]).toContain("Mean of 3 readings with a digital calliper");
+    expect(size.basis.join(" ")).toContain("The 3 readings scatter");
+    expect(size.basis.join(" ")).toContain("The readings differ by 0.30 mm; measuring alone explains");
+  });
+
+  it("searches a size that was worked out where no part is left, and corrects it for nothing", async () => {
+    const [near, far] = [
+      await buildPart({ kind: "flat-belt", sizes: { insideCircumference: [905, 1] } }),
+      await buildPart({ kind: "flat-belt", sizes: { insideCircumference: [990, 1] } }),
+    ];
+    const query = { kind: "flat-belt", insideCircumference: "900 ± 8 mm" };
+    for (const condition of ["missing", "melted", "slack"]) {
+      const answer = await search({ ...query, condition });
+      expect(ids(answer)).toEqual([near.id]);
+      const size = answer.need.dimensions[0]!;
+      expect(size).toMatchObject({
+        text: "900 ± 8 mm",
+        echo: "worked out as 900 ± 8 mm",
+        asFoundMm: null,
+        asNewMm: 900,
+      });
+      // JCGM 100:2008 4.3.7: 8 / sqrt 3.
+      expect(size.standardUncertaintyMm).toBeCloseTo(4.618802, 6);
+      expect(size.basis[0]).toBe("Worked out as 900 ± 8 mm, not measured: no correction.");
+    }
+    expect(ids(await search({ ...query, insideCircumference: "985 +/- 8", condition: "missing" }))).toEqual([far.id]);
+  });
+
+  it("corrects what was measured beside a size that was worked out", async () => {
+    const answer = await search({
+      kind: "idler-wheel",
+      outsideDiameter: "1.14 ± 0.02 in",
+      secondTreadDiameter: "18.00",
+      condition: "glazed",
+    });
+    const [workedOut, measured] = answer.need.dimensions;
+    expect(workedOut).toMatchObject({ asFoundMm: null, echo: "worked out as 1.14 ± 0.02 in = 28.96 ± 0.51 mm" });
+    expect(workedOut!.asNewMm).toBeCloseTo(28.956, 12);
+    expect(measured!.asFoundMm).toBe(18);
+    expect(measured!.asNewMm).toBeGreaterThan(18);
+  });
+
   it("tells what restorers reported", async () => {
     const part = await buildPart({ sizes: { outsideDiameter: 75 } });
     const users = [await buildUser(), await buildUser(), await buildUser()];
