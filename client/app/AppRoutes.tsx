@@ -1,5 +1,5 @@
 import { lazy } from "react";
-import { Route, Routes } from "react-router-dom";
+import { Navigate, Route, Routes } from "react-router-dom";
 import { Layout } from "./Layout";
 import { NotFoundPage } from "./NotFoundPage";
 
@@ -17,7 +17,8 @@ const WorkshopListPage = lazy(async () => ({
 const WorkshopPage = lazy(async () => ({
   default: (await import("../features/workshops/WorkshopPage")).WorkshopPage,
 }));
-const WorkingPage = lazy(async () => ({ default: (await import("../features/working/WorkingPage")).WorkingPage }));
+const GuidesPage = lazy(async () => ({ default: (await import("../features/guides/GuidesPage")).GuidesPage }));
+const GuidePage = lazy(async () => ({ default: (await import("../features/guides/GuidePage")).GuidePage }));
 const SignInPage = lazy(async () => ({ default: (await import("../features/account/SignInPage")).SignInPage }));
 const SignUpPage = lazy(async () => ({ default: (await import("../features/account/SignUpPage")).SignUpPage }));
 const CheckMailPage = lazy(async () => ({
@@ -41,6 +42,7 @@ const BasketPage = lazy(async () => ({ default: (await import("../features/baske
 const CheckoutPage = lazy(async () => ({ default: (await import("../features/basket/CheckoutPage")).CheckoutPage }));
 const OrdersPage = lazy(async () => ({ default: (await import("../features/orders/OrdersPage")).OrdersPage }));
 const OrderPage = lazy(async () => ({ default: (await import("../features/orders/OrderPage")).OrderPage }));
+const ORingsPage = lazy(async () => ({ default: (await import("../features/gauges/o-rings/ORingsPage")).ORingsPage }));
 
 /**
  * Every address and its page. Declarative on purpose: the router with loaders weighs 18 kB more (gzip), and queries
@@ -57,7 +59,10 @@ export function AppRoutes() {
         <Route path="families/:slug" element={<FamilyPage />} />
         <Route path="workshops" element={<WorkshopListPage />} />
         <Route path="workshops/:slug" element={<WorkshopPage />} />
-        <Route path="working" element={<WorkingPage />} />
+        <Route path="gauges/o-rings" element={<ORingsPage />} />
+        <Route path="guides" element={<GuidesPage />} />
+        <Route path="guides/:slug" element={<GuidePage notFound={<NotFoundPage />} />} />
+        <Route path="working" element={<Navigate to="/guides/fit-chance" replace />} />
       </Route>
       <Route element={<Layout />}>
         <Route path="sign-in" element={<SignInPage />} />
