@@ -1,12 +1,11 @@
-import { conditionCorrection } from "./conditionCorrections";
-import { type Condition, conditionFacts, conditionProblem } from "./conditions";
-import { DomainError } from "./DomainError";
+import type { Condition } from "./conditions";
 import { traitsOf } from "./dimensionTraits";
 import { findFlatSpot } from "./flatSpot";
 import { type Instrument, instrumentFacts } from "./instruments";
 import { formatLength } from "./length";
 import { measure } from "./measure";
-import { type DimensionName, dimensionWords, type PartKind } from "./partKinds";
+import type { DimensionName, PartKind } from "./partKinds";
+import { checkMeasurable, putBackCondition } from "./putBackCondition";
 import { type Contribution, combined, rectangular } from "./uncertainty";
 
 export type Estimate = { valueMm: number; standardUncertaintyMm: number };
@@ -31,13 +30,9 @@ export type AsNewEstimate = {
 
 const noSource = "common practice, no source";
 const mm = (length: number, decimals = 2) => formatLength(length, "mm", { decimals });
-const plusMinus = ({ valueMm, standardUncertaintyMm }: Estimate) =>
+/** "44.15 ± 0.17 mm", with k = 2. */
+export const plusMinus = ({ valueMm, standardUncertaintyMm }: Estimate) =>
   `${mm(valueMm).replace(" mm", "")} ± ${mm(2 * standardUncertaintyMm)}`;
-
-function changeWords(correctionMm: number): string {
-  if (correctionMm === 0) return "hardly changed";
-  return correctionMm < 0 ? `added about ${mm(-correctionMm)} to` : `took about ${mm(correctionMm)} from`;
-}
 
 /** A flat only takes away, so the highest reading lies nearest to the round; one reading may lie across the flat. */
 function flatSpotTerm(readingsMm: readonly number[], meanMm: number): { correctionMm: number; term: Contribution } {
@@ -65,12 +60,7 @@ function flatSpotTerm(readingsMm: readonly number[], meanMm: number): { correcti
 export function estimateAsNew(input: AsNewInput): AsNewEstimate {
   const { kind, dimension, readingsMm, instrument, condition } = input;
   const traits = traitsOf(kind, dimension);
-  const problem = conditionProblem(kind, condition);
-  if (problem) throw new DomainError("condition", problem);
-  if (!conditionFacts[condition].hasReadings) {
-    const words = `A ${condition} part has no size left to measure. Work it out from the pulleys or the mechanism family.`;
-    throw new DomainError("condition", words);
-  }
+  checkMeasurable(kind, condition);
 
   const found = measure({ ...input, traits });
   const asFound = { valueMm: found.valueMm, standardUncertaintyMm: found.standardUncertaintyMm };
@@ -95,19 +85,10 @@ export function estimateAsNew(input: AsNewInput): AsNewEstimate {
     basis.push(`${term.words}: ${mm(correctionMm)} put back (${noSource}).`);
   }
 
-  const correction = conditionCorrection(traits.role, condition, asFound.valueMm);
-  valueMm += correction.correctionMm;
-  const { name } = conditionFacts[condition];
-  if (traits.role === "rigid") {
-    basis.push(`The ${dimensionWords[dimension]} is metal or bush and does not change with the rubber: not corrected.`);
-  } else if (correction.standardUncertaintyMm === 0) {
-    basis.push(`A ${name} part is taken at the size it has: not corrected (${noSource}).`);
-  } else {
-    const { correctionMm, standardUncertaintyMm } = correction;
-    const words = `Being ${name} ${changeWords(correctionMm)} the ${dimensionWords[dimension]}`;
-    budget.push({ name: "condition", standardUncertaintyMm, words, source: noSource });
-    basis.push(`${words}, give or take ${mm(2 * standardUncertaintyMm)} (${noSource}).`);
-  }
+  const change = putBackCondition(traits.role, condition, asFound.valueMm, dimension);
+  valueMm += change.correctionMm;
+  budget.push(...change.terms);
+  basis.push(change.basis);
 
   const asNew = { valueMm, standardUncertaintyMm: combined(budget) };
   basis.push(`As new ${plusMinus(asNew)} (k = 2).`);

@@ -19,7 +19,8 @@ type MeasureInput = {
 export const mostReadings = 100;
 const noSource = "common practice, no source";
 
-function checkReadings(readingsMm: readonly number[]) {
+/** Throws a DomainError on "readingsMm" or "readingsMm/<index>" for what cannot be readings of a length. */
+export function checkReadings(readingsMm: readonly number[]) {
   if (readingsMm.length === 0) throw new DomainError("readingsMm", "Give at least one reading.");
   if (readingsMm.length > mostReadings) throw new DomainError("readingsMm", `Give at most ${mostReadings} readings.`);
   for (const [i, reading] of readingsMm.entries()) {

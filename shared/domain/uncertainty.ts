@@ -1,6 +1,6 @@
 /** One term of an uncertainty budget: its standard uncertainty in mm and where it comes from, in words. */
 export type Contribution = {
-  name: "instrument" | "resolution" | "repeatability" | "softness" | "flat-spot" | "condition";
+  name: "instrument" | "resolution" | "repeatability" | "softness" | "thickness" | "flat-spot" | "condition";
   standardUncertaintyMm: number;
   words: string;
   source: string;
