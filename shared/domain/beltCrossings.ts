@@ -9,8 +9,8 @@ export const spanOf = (contacts: readonly Contact[], i: number): Line => ({
   to: contacts[(i + 1) % contacts.length]!.arrive,
 });
 
-/** How far left of the line a point lies, mm. Not a number for a line without length, which crosses nothing. */
-const leftOf = ({ from, to }: Line, { x, y }: Point) =>
+/** How far left of a line a point lies, mm; not a number for a line without length, which crosses nothing. */
+export const leftOf = ({ from, to }: Line, { x, y }: Point) =>
   ((to.x - from.x) * (y - from.y) - (to.y - from.y) * (x - from.x)) / Math.hypot(to.x - from.x, to.y - from.y);
 
 /** Whether the ends of one lie on different sides of the other, by more than rounding. */

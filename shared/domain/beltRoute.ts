@@ -49,8 +49,8 @@ function checkInput({ pulleys, thickness, stretchPercent }: BeltRouteInput): voi
   const limits = beltRouteLimits;
   check("pulleys", pulleys.length, limits.pulleys, "The count of pulleys");
   for (const [i, { x, y, diameter, wrap }] of pulleys.entries()) {
-    check(`pulleys/${i}/x`, x, limits.place, "x in mm");
-    check(`pulleys/${i}/y`, y, limits.place, "y in mm");
+    check(`pulleys/${i}/x`, x, limits.place, "Coordinate x in mm");
+    check(`pulleys/${i}/y`, y, limits.place, "Coordinate y in mm");
     check(`pulleys/${i}/diameter`, diameter, limits.diameter, "A diameter in mm");
     if (!beltWraps.includes(wrap))
       throw new DomainError(`pulleys/${i}/wrap`, "A pulley touches the inside or the back.");

@@ -1,9 +1,10 @@
-import { beltCrossings } from "./beltCrossings";
+import { beltCrossings, leftOf, spanOf } from "./beltCrossings";
 import type { Pulley } from "./beltRoute";
-import { beltTangents, type Contact } from "./beltTangents";
+import { beltTangents, type Contact, noGapMm } from "./beltTangents";
 import { DomainError } from "./DomainError";
 
 type Sense = 1 | -1;
+type Senses = [Sense, Sense];
 type Attempt = {
   contacts: Contact[];
   /** Full turns of the belt, inside wraps counted up and back wraps down: 1 closes, 0 is a figure of eight. */
@@ -26,13 +27,13 @@ function winding(pulleys: readonly Pulley[]): number {
 }
 
 /** The sense that the order of the inside pulleys gives, else that of all of them; and the other one. */
-function sensesOf(pulleys: readonly Pulley[]): [Sense, Sense] {
+function sensesOf(pulleys: readonly Pulley[]): Senses {
   const inside = pulleys.filter(({ wrap }) => wrap === "inside");
   const first = (winding(inside) || winding(pulleys)) < 0 ? -1 : 1;
   return [first, first === 1 ? -1 : 1];
 }
 
-function attempt(pulleys: readonly Pulley[], thickness: number, sense: Sense): Attempt[] {
+function attempt(pulleys: readonly Pulley[], thickness: number, sense: Sense): Attempt | undefined {
   const contacts = beltTangents(
     pulleys.map(({ x, y, diameter, wrap }) => ({
       x,
@@ -41,20 +42,33 @@ function attempt(pulleys: readonly Pulley[], thickness: number, sense: Sense): A
       turn: (wrap === "inside" ? sense : -sense) as Sense,
     })),
   );
-  if (!contacts) return [];
+  if (!contacts) return undefined;
   const total = contacts.reduce((sum, { wrap, turn }) => sum + sense * turn * wrap, 0);
-  return [{ contacts, turns: Math.round(total / (2 * Math.PI)), isClean: beltCrossings(contacts).length === 0 }];
+  return { contacts, turns: Math.round(total / (2 * Math.PI)), isClean: beltCrossings(contacts).length === 0 };
 }
 
-const attempts = (pulleys: readonly Pulley[], thickness: number): Attempt[] =>
-  sensesOf(pulleys).flatMap((sense) => attempt(pulleys, thickness, sense));
+const closesCleanly = (tried: Attempt | undefined) => tried?.turns === 1 && tried.isClean;
 
 /**
- * A route that turns once. The sense that is not given by the order is taken only where nothing crosses there: round an
- * idler that hangs free, the wrong sense adds up to one turn too, by looping through itself.
+ * What leaving one pulley out would do: whether the rest close, and how far the pulley then stays clear of the belt that
+ * goes past it, mm. Less than 0: it would be in the way, so it is the order or the side that is wrong. Not a number where
+ * the rest have no route.
  */
-const closed = (tries: readonly Attempt[]): Attempt | undefined =>
-  tries.find(({ turns, isClean }) => turns === 1 && isClean) ?? tries.slice(0, 1).find(({ turns }) => turns === 1);
+function without(pulleys: readonly Pulley[], thickness: number, [sense, other]: Senses, index: number) {
+  const rest = pulleys.filter((_, i) => i !== index);
+  const tried = attempt(rest, thickness, sense);
+  const { wrap, diameter } = pulleys[index]!;
+  const past = tried && spanOf(tried.contacts, (index || rest.length) - 1);
+  const aside = past ? leftOf(past, pulleys[index]!) : Number.NaN;
+  const clear = (wrap === "inside" ? sense : -sense) * aside - (diameter + thickness) / 2;
+  return {
+    index,
+    clear,
+    closes: closesCleanly(tried) || closesCleanly(attempt(rest, thickness, other)),
+    // A pulley that is touched may free others when it goes, so what stays clear is named before what makes the rest close.
+    rank: (clear > -noGapMm ? 2 : 0) + (closesCleanly(tried) ? 1 : 0),
+  };
+}
 
 /**
  * The line of a belt that really closes round these pulleys, and whether it is crossed (a figure of eight).
@@ -66,31 +80,32 @@ const closed = (tries: readonly Attempt[]): Attempt | undefined =>
  *         belt with two pulleys, and with more only if no pulley can be left out so that the rest close in one turn.
  */
 export function closeBelt(pulleys: readonly Pulley[], thickness: number): { contacts: Contact[]; isCrossed: boolean } {
-  const tries = attempts(pulleys, thickness);
-  const good = closed(tries);
+  const senses = sensesOf(pulleys);
+  const [given, other] = senses.map((sense) => attempt(pulleys, thickness, sense));
+  const tries = [given, other].filter((tried) => tried !== undefined);
+  // Round an idler that hangs free, the wrong sense adds up to one turn too, by looping through itself: hence clean ones.
+  const good = tries.find(closesCleanly) ?? (given?.turns === 1 ? given : undefined);
   if (good) return { contacts: good.contacts, isCrossed: false };
 
-  const back = pulleys.findIndex(({ wrap }) => wrap === "back");
-  if (tries.some(({ turns, isClean }) => turns === -1 && isClean)) {
-    const words = "Inside and back are the wrong way round here: pulleys that the belt runs round are inside.";
-    throw new DomainError(`pulleys/${back}`, `Pulley ${back + 1} cannot touch the back. ${words}`);
-  }
   const eight = tries.find(({ turns }) => turns === 0);
-  const contacts = (eight ?? tries[0])?.contacts ?? [];
-  const byWrap = pulleys.map((_, i) => i).sort((a, b) => (contacts[b]?.wrap ?? 0) - (contacts[a]?.wrap ?? 0));
-  const free = byWrap.find((left) =>
-    closed(
-      attempts(
-        pulleys.filter((_, i) => i !== left),
-        thickness,
-      ),
-    ),
-  );
-  if (eight && (pulleys.length === 2 || free === undefined)) return { contacts, isCrossed: true };
+  if (eight && pulleys.length === 2) return { contacts: eight.contacts, isCrossed: true };
+  if (tries.some(({ turns, isClean }) => turns === -1 && isClean)) {
+    const back = pulleys.findIndex(({ wrap }) => wrap === "back");
+    throw new DomainError(
+      `pulleys/${back}`,
+      `The belt runs round pulley ${back + 1}, which is on its back: inside and back are the wrong way round here.`,
+    );
+  }
+  const left = pulleys.map((_, i) => without(pulleys, thickness, senses, i));
+  if (eight && !left.some(({ closes }) => closes)) return { contacts: eight.contacts, isCrossed: true };
 
-  const named = free ?? byWrap[0] ?? 0;
+  const named = left.reduce((a, b) => (b.rank > a.rank || (b.rank === a.rank && b.clear > a.clear) ? b : a));
+  const [what, how] =
+    named.rank > 1
+      ? ["does not touch", "Move it to the belt, change its side"]
+      : ["cannot close at", "Change its side"];
   throw new DomainError(
-    `pulleys/${named}`,
-    `The belt does not touch pulley ${named + 1}. Move it to the belt, change its side or its place in the order, or leave it out.`,
+    `pulleys/${named.index}`,
+    `The belt ${what} pulley ${named.index + 1}. ${how} or its place in the order, or leave it out.`,
   );
 }
