@@ -42,6 +42,7 @@ const BasketPage = lazy(async () => ({ default: (await import("../features/baske
 const CheckoutPage = lazy(async () => ({ default: (await import("../features/basket/CheckoutPage")).CheckoutPage }));
 const OrdersPage = lazy(async () => ({ default: (await import("../features/orders/OrdersPage")).OrdersPage }));
 const OrderPage = lazy(async () => ({ default: (await import("../features/orders/OrderPage")).OrderPage }));
+const SpeedPage = lazy(async () => ({ default: (await import("../features/gauges/speed/SpeedPage")).SpeedPage }));
 const ORingsPage = lazy(async () => ({ default: (await import("../features/gauges/o-rings/ORingsPage")).ORingsPage }));
 
 /**
@@ -59,6 +60,7 @@ export function AppRoutes() {
         <Route path="families/:slug" element={<FamilyPage />} />
         <Route path="workshops" element={<WorkshopListPage />} />
         <Route path="workshops/:slug" element={<WorkshopPage />} />
+        <Route path="gauges/speed" element={<SpeedPage />} />
         <Route path="gauges/o-rings" element={<ORingsPage />} />
         <Route path="guides" element={<GuidesPage />} />
         <Route path="guides/:slug" element={<GuidePage notFound={<NotFoundPage />} />} />

@@ -1,0 +1,40 @@
+import type { SpeedInput } from "#shared/domain/driveTrain";
+import { nominalSpeeds } from "#shared/domain/nominalSpeeds";
+import { roundDecimal } from "#shared/domain/roundDecimal";
+import type { SpeedResult } from "#shared/domain/speed";
+import type { SizeUnit } from "../../../lib/formatSize";
+import { Readout } from "../Readout";
+import { sizeName } from "./sizeNames";
+
+type Props = { input: SpeedInput; result: SpeedResult; unit: SizeUnit };
+
+/** A size to turn on a lathe: to the micrometre, or the ten-thousandth of an inch. */
+export const turnedSize = (mm: number, unit: SizeUnit): string =>
+  unit === "mm" ? roundDecimal(mm, 3) : roundDecimal(mm / 25.4, 4);
+
+/** The motor's step or pulley that would hit the target from this motor. */
+export function FirstSize({ input, result, unit }: Props) {
+  const [first] = result.sizes;
+  if (!first || !result.target) return null;
+  const stages = input.drive === "capstan" ? input.stages.length : 1;
+  const name = sizeName(first.field, stages).toLowerCase();
+  const isTape = input.drive === "capstan";
+  const wanted = isTape ? `${result.target} in/s` : `${result.target} rpm`;
+  const need = first.neededMm;
+  if (need === undefined) {
+    return (
+      <Readout label={`For just ${wanted}`} value={null}>
+        <p>No {name} is small enough with so thick a belt.</p>
+      </Readout>
+    );
+  }
+  const speed = nominalSpeeds[result.target];
+  return (
+    <Readout label={`For just ${wanted}`} value={`ø ${turnedSize(need, unit)}`} unit={unit} look="measured">
+      <p>
+        {sizeName(first.field, stages)} to turn for {isTape ? `${speed} mm/s` : wanted} from this motor; it has ø{" "}
+        {turnedSize(first.mm, unit)} now. Or change one other size: see the table.
+      </p>
+    </Readout>
+  );
+}
