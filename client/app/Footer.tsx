@@ -22,7 +22,10 @@ export function Footer() {
             rubber is common practice without a published source, and is marked so wherever it is used.
           </p>
           <p className="flex flex-wrap gap-x-5 gap-y-1">
-            <Link to="/working" className="inline-flex min-h-6 items-center">
+            <Link to="/guides" className="inline-flex min-h-6 items-center">
+              Guides
+            </Link>
+            <Link to="/guides/fit-chance" className="inline-flex min-h-6 items-center">
               The working in full, with sources
             </Link>
             <a href="/api/docs" className="inline-flex min-h-6 items-center">

@@ -14,11 +14,11 @@ export function AgeChart({ kind, dimension, sizeMm }: Props) {
   const rows = ageRows(kind, dimension, sizeMm);
   const reach = Math.max(...rows.map(({ correctionMm, spreadMm }) => Math.abs(correctionMm) + spreadMm)) * 1.05;
   const step = niceStep(reach / 2);
-  const xOf = (mm: number) => width / 2 + (mm / reach) * (width / 2 - 20);
+  const xOf = (mm: number) => width / 2 + (mm / reach) * (width / 2 - 56);
   const count = Math.floor(reach / step);
   const ticks = Array.from({ length: 2 * count + 1 }, (_, i) => (i - count) * step);
   return (
-    <div className="max-w-2xl border border-rule bg-sheet px-3 py-3 print:break-inside-avoid">
+    <div className="h-full border border-rule bg-sheet px-3 py-3 print:break-inside-avoid">
       <div ref={place}>
         <ul className="grid gap-2.5">
           {rows.map((row) => (
@@ -67,7 +67,7 @@ function Bars({ row, width, xOf }: { row: AgeRow; width: number; xOf: (mm: numbe
     xOf(correctionMm - spreadMm),
     xOf(correctionMm + spreadMm),
   ];
-  const cut = width * 0.06;
+  const cut = 24;
   return (
     <svg width={width} height="30" viewBox={`0 0 ${width} 30`} className="block" aria-hidden="true">
       <rect x="0.5" y="2" width={found} height="10" fill="var(--color-rubber)" stroke="var(--color-ink)" />

@@ -64,30 +64,34 @@ export function ConditionsGuide() {
           condition that is plainest; between two, take the one with the wider range.
         </p>
       </GuideSection>
-      {shown.map(({ title, kind, dimension, words }) => (
-        <GuideSection key={title} title={title}>
-          <p className="max-w-prose">{words}</p>
-          <AgeChart kind={kind} dimension={dimension} sizeMm={exampleSizes[kind][dimension] ?? 10} />
+      <div className="grid gap-x-12 lg:grid-cols-2">
+        {shown.map(({ title, kind, dimension, words }) => (
+          <GuideSection key={title} title={title}>
+            <p className="max-w-prose">{words}</p>
+            <AgeChart kind={kind} dimension={dimension} sizeMm={exampleSizes[kind][dimension] ?? 10} />
+          </GuideSection>
+        ))}
+        <GuideSection title="Metal does not age with the rubber">
+          <p className="max-w-prose">
+            Bore and overall height are metal or bush: they are taken as they were read, whatever the rubber looks like.
+          </p>
         </GuideSection>
-      ))}
-      <GuideSection title="Metal does not age with the rubber">
-        <p className="max-w-prose">
-          Bore and overall height are metal or bush: they are taken as they were read, whatever the rubber looks like.
-        </p>
-      </GuideSection>
-      <GuideSection title="A flat spot">
-        <p className="max-w-prose">
-          A wheel that was parked against its shaft has a dent. Three readings round it show that, where they differ by
-          more than measuring explains. Its size when new is then reckoned from the highest reading. For example:
-        </p>
-        <Points points={flat.basis} />
-      </GuideSection>
-      <GuideSection title="Melted or missing">
-        <p className="max-w-prose">
-          Nothing is left to measure. Work a belt out <Link to="/gauges/belt-route">from its pulleys</Link>, or look
-          under <Link to="/families">the mechanism family</Link>, whose service points may be on the register.
-        </p>
-      </GuideSection>
+      </div>
+      <div className="grid gap-x-12 lg:grid-cols-2">
+        <GuideSection title="A flat spot">
+          <p className="max-w-prose">
+            A wheel that was parked against its shaft has a dent. Three readings round it show that, where they differ
+            by more than measuring explains. Its size when new is then reckoned from the highest reading. For example:
+          </p>
+          <Points points={flat.basis} />
+        </GuideSection>
+        <GuideSection title="Melted or missing">
+          <p className="max-w-prose">
+            Nothing is left to measure. Work a belt out <Link to="/gauges/belt-route">from its pulleys</Link>, or look
+            under <Link to="/families">the mechanism family</Link>, whose service points may be on the register.
+          </p>
+        </GuideSection>
+      </div>
       <Sources
         sources={[
           "All corrections and their ranges: common practice, no source. Every estimate says where one was used.",

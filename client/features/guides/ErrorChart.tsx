@@ -36,7 +36,7 @@ export function ErrorChart({ sizesMm }: { sizesMm: readonly number[] }) {
           return (
             <g key={instrument}>
               <path d={`M${xOf(least)} ${y}H${xOf(most)}`} stroke="var(--color-measured)" strokeWidth="4" />
-              {errors.map((error) => (
+              {[...new Set(errors)].map((error) => (
                 <circle key={error} cx={xOf(error)} cy={y} r="4.5" fill="var(--color-measured)" />
               ))}
               <text

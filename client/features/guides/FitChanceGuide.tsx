@@ -36,35 +36,38 @@ export function FitChanceGuide() {
       <GuideSection title="A worked example">
         <WorkedExample />
       </GuideSection>
-      <GuideSection title="Several sizes">
-        <p className="max-w-prose">
-          The chances of the sizes are multiplied, as if they were independent. Sizes that were not checked count for
-          nothing, so the number checked stands beside every verdict.
-        </p>
-        <VerdictLines />
-      </GuideSection>
-      <GuideSection title="What the place accepts">
-        <p className="max-w-prose">
-          Where the register of a mechanism family knows the band that a service point accepts, that band is used. Else
-          the usual one for the kind and size is taken: common practice, no source. The guide of each kind shows them.
-        </p>
-      </GuideSection>
-      <GuideSection title="Order of the results" id="order">
-        <p className="max-w-prose">
-          Best fit puts the highest chance first, landed price the lowest price with postage to your country, soonest
-          the fewest days until the part leaves its workshop. Nobody can pay to stand higher.
-        </p>
-      </GuideSection>
-      <GuideSection title="When it arrives">
-        <p className="max-w-prose">
-          Measure it again. It conforms where your mean lies inside the stated limits by more than your uncertainty
-          explains, and does not where it lies as far outside. In between it cannot be told with this instrument, and
-          nobody is blamed for that.
-        </p>
-        <p>
-          <Link to="/guides/limits">What cannot be known</Link>
-        </p>
-      </GuideSection>
+      <div className="grid gap-x-12 lg:grid-cols-2">
+        <GuideSection title="Several sizes">
+          <p className="max-w-prose">
+            The chances of the sizes are multiplied, as if they were independent. Sizes that were not checked count for
+            nothing, so the number checked stands beside every verdict.
+          </p>
+          <VerdictLines />
+        </GuideSection>
+        <GuideSection title="What the place accepts">
+          <p className="max-w-prose">
+            Where the register of a mechanism family knows the band that a service point accepts, that band is used.
+            Else the usual one for the kind and size is taken: common practice, no source. The guide of each kind shows
+            them.
+          </p>
+        </GuideSection>
+        <GuideSection title="Order of the results" id="order">
+          <p className="max-w-prose">
+            Best fit puts the highest chance first, landed price the lowest price with postage to your country, soonest
+            the fewest days until the part leaves its workshop. Nobody can pay to stand higher.
+          </p>
+        </GuideSection>
+        <GuideSection title="When it arrives">
+          <p className="max-w-prose">
+            Measure it again. It conforms where your mean lies inside the stated limits by more than your uncertainty
+            explains, and does not where it lies as far outside. In between it cannot be told with this instrument, and
+            nobody is blamed for that.
+          </p>
+          <p>
+            <Link to="/guides/limits">What cannot be known</Link>
+          </p>
+        </GuideSection>
+      </div>
       <Sources sources={sources} />
     </>
   );

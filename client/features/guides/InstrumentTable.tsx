@@ -3,7 +3,7 @@ import { permissibleError } from "#shared/domain/permissibleError";
 import { roundDecimal } from "#shared/domain/roundDecimal";
 import { capitalised } from "../../lib/capitalised";
 
-const figure = (mm: number) => roundDecimal(mm, mm < 0.01 ? 3 : mm < 1 ? 2 : 1);
+const figure = (mm: number) => roundDecimal(mm, mm < 0.02 ? 3 : mm < 1 ? 2 : 1);
 
 /** How finely each instrument is read and how far it may be off, at each of these sizes; then with its inside jaws. */
 export function InstrumentTable({ sizesMm }: { sizesMm: readonly number[] }) {
@@ -44,7 +44,7 @@ function Row({ instrument, sizesMm, inside = false }: RowProps) {
         {capitalised(name)}
         {inside && <span className="text-small text-soft"> inside jaws</span>}
       </th>
-      <td className="py-1.5 pl-2 text-right">{figure(stepMm)}</td>
+      <td className="py-1.5 pl-2 text-right">{stepMm}</td>
       {sizesMm.map((size) => (
         <td key={size} className="py-1.5 pl-2 text-right">
           {figure(permissibleError(instrument, size, { inside }).plusMinusMm)}

@@ -59,10 +59,10 @@ export function InstrumentsGuide() {
           In millimetres, inches, fractions or thou; what was understood is shown back. A fraction counts as rounded to
           its last part, a decimal as what the instrument showed.
         </p>
-        <table className="max-w-md text-left">
+        <table className="max-w-xl text-left">
           <thead className="text-small text-soft">
             <tr>
-              <th className="py-1 pr-8 font-semibold">You write</th>
+              <th className="py-1 pr-8 font-semibold whitespace-nowrap">You write</th>
               <th className="py-1 font-semibold">It is read as</th>
             </tr>
           </thead>
@@ -71,7 +71,7 @@ export function InstrumentsGuide() {
               const read = parseLength(text, "mm");
               return (
                 <tr key={text} className="border-t border-rule">
-                  <th scope="row" className="py-1 pr-8 font-normal text-measured">
+                  <th scope="row" className="py-1 pr-8 font-normal whitespace-nowrap text-measured">
                     {text}
                   </th>
                   <td className="py-1">{read.ok ? read.echo : read.problem}</td>

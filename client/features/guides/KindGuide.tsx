@@ -21,9 +21,14 @@ export function KindGuide({ guide: { kinds } }: { guide: Guide }) {
           <Sizes kind={kind} />
         </GuideSection>
       ))}
-      <GuideSection title="Common mistakes">
-        <Points points={[...mistakes]} />
-      </GuideSection>
+      <div className="grid gap-x-12 lg:grid-cols-2">
+        <GuideSection title="Common mistakes">
+          <Points points={[...mistakes]} />
+        </GuideSection>
+        <GuideSection title="Mind">
+          <Points points={[...minded].map((name) => cautions[name])} />
+        </GuideSection>
+      </div>
       <GuideSection title="How fine it has to be">
         <p className="max-w-prose">
           What such places usually accept, for a part of a usual size, and the coarsest instrument with which one
@@ -33,9 +38,6 @@ export function KindGuide({ guide: { kinds } }: { guide: Guide }) {
         {kinds.map((kind) => (
           <HowFine key={kind} kind={kind} />
         ))}
-      </GuideSection>
-      <GuideSection title="Mind">
-        <Points points={[...minded].map((name) => cautions[name])} />
       </GuideSection>
       <WhereNext kinds={kinds} />
       <p className="mt-6 text-small text-soft">How to measure: common practice, no source.</p>

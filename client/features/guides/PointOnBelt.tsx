@@ -14,8 +14,8 @@ export function PointOnBelt({ depthMm, thicknessMm }: { depthMm: number; thickne
       fontWeight="600"
       fill="var(--color-measured)"
     >
-      <rect x="20" y={top} width="280" height={table - top} fill="var(--color-rubber)" stroke="var(--color-ink)" />
-      <rect x="20" y={table} width="280" height="44" fill="var(--color-metal-fill)" stroke="var(--color-metal)" />
+      <rect x="48" y={top} width="252" height={table - top} fill="var(--color-rubber)" stroke="var(--color-ink)" />
+      <rect x="48" y={table} width="252" height="44" fill="var(--color-metal-fill)" stroke="var(--color-metal)" />
       <path
         d={`M100 20H220V${top}H188V${top}L165 ${tip}H155L132 ${top}H100Z`}
         fill="var(--color-ground)"
@@ -30,7 +30,12 @@ export function PointOnBelt({ depthMm, thicknessMm }: { depthMm: number; thickne
       <text x="240" y={top - 8}>
         {depthMm.toFixed(1)} mm
       </text>
-      <text x="26" y={top - 8} fill="var(--color-ink)">
+      <path
+        d={`M46 ${top}H24M46 ${table}H24M30 ${top}V${table}M30 ${top}l-3.5 8h7ZM30 ${table}l-3.5 -8h7Z`}
+        fill="var(--color-ink)"
+        stroke="var(--color-ink)"
+      />
+      <text x="22" y={top - 8} fill="var(--color-ink)">
         {thicknessMm} mm
       </text>
     </svg>

@@ -7,7 +7,7 @@ const tool = { kind, instrument: "digital-caliper", condition: "hardened" } as c
 /** An idler gone hard, and a part that somebody offers: an example of ours. */
 export const readings = { outsideDiameter: [43.86, 43.9, 43.88], bore: [4.01] } as const;
 export const offered = {
-  outsideDiameter: { nominalMm: 44.2, plusMinusMm: 0.15 },
+  outsideDiameter: { nominalMm: 44.4, plusMinusMm: 0.15 },
   bore: { nominalMm: 4, plusMinusMm: 0.02 },
 } as const satisfies Record<string, StatedSize>;
 

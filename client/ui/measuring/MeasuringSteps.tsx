@@ -12,7 +12,7 @@ export function MeasuringSteps({ kind, dimensions }: Props) {
       {dimensions.map((dimension) => (
         <li
           key={dimension}
-          className="grid grid-cols-[8.5rem_1fr] content-start gap-x-4 gap-y-1 sm:grid-cols-1 print:break-inside-avoid"
+          className="grid grid-cols-[10rem_1fr] content-start gap-x-4 gap-y-1 sm:grid-cols-1 print:break-inside-avoid"
         >
           <MeasuringDrawing
             kind={kind}

@@ -14,7 +14,7 @@ type MeasuringWords = {
  * How each kind is measured. Common practice, no source: the pages that show these words say so.
  */
 const wheelSteps = {
-  bore: "Open the inside jaws in the hole until they just bind. Turn them a quarter and read again: the larger reading is out of round.",
+  bore: "Open the inside jaws in the hole until they just bind. Turn them a quarter and read again: a difference shows a hole worn oval.",
   treadWidth: "Close the jaws on the two edges of the rubber, not on the metal.",
   overallHeight: "Close the jaws on the two end faces of the metal, over its whole length.",
 };
@@ -95,7 +95,7 @@ export const measuringWords: Record<PartKind, MeasuringWords> = {
     },
     mistakes: [
       ...loopMistakes,
-      "A string that stretches: wet cotton and rubber thread read short.",
+      "A string that stretches: take thin dry twine, and pull it no tighter on the rule than in the belt.",
       "A thick string: it runs inside the belt by half its own thickness, so the loop comes out small.",
     ],
     cautions: ["power", "tar", "solvent"],
