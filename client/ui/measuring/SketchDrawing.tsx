@@ -3,8 +3,8 @@ import { type Drawn, type Letter, type Look, letterSize, letterWidth, type Sketc
 
 type Props = {
   sketch: Sketch;
-  /** What it shows, in words; left out where words beside it say so. */
-  label?: string;
+  /** What it shows, in words. */
+  label: string;
   className?: string | undefined;
 };
 
@@ -67,7 +67,8 @@ export function SketchDrawing({ sketch, label, className }: Props) {
   const { width, height } = sketchBox;
   return (
     <svg
-      {...(label === undefined ? { "aria-hidden": true } : { role: "img", "aria-label": label })}
+      role="img"
+      aria-label={label}
       viewBox={`0 0 ${width} ${height}`}
       width={width}
       height={height}
