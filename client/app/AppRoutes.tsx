@@ -43,6 +43,9 @@ const CheckoutPage = lazy(async () => ({ default: (await import("../features/bas
 const OrdersPage = lazy(async () => ({ default: (await import("../features/orders/OrdersPage")).OrdersPage }));
 const OrderPage = lazy(async () => ({ default: (await import("../features/orders/OrderPage")).OrderPage }));
 const SpeedPage = lazy(async () => ({ default: (await import("../features/gauges/speed/SpeedPage")).SpeedPage }));
+const BeltSamplePage = lazy(async () => ({
+  default: (await import("../features/gauges/belt-sample/BeltSamplePage")).BeltSamplePage,
+}));
 const ORingsPage = lazy(async () => ({ default: (await import("../features/gauges/o-rings/ORingsPage")).ORingsPage }));
 
 /**
@@ -60,6 +63,7 @@ export function AppRoutes() {
         <Route path="families/:slug" element={<FamilyPage />} />
         <Route path="workshops" element={<WorkshopListPage />} />
         <Route path="workshops/:slug" element={<WorkshopPage />} />
+        <Route path="gauges/belt-sample" element={<BeltSamplePage />} />
         <Route path="gauges/speed" element={<SpeedPage />} />
         <Route path="gauges/o-rings" element={<ORingsPage />} />
         <Route path="guides" element={<GuidesPage />} />
