@@ -30,6 +30,9 @@ type Definition<A extends Access, P extends Shape, Q extends Shape, B extends Sh
   limit?: Limit;
 };
 
+/** What a call answers that gives a file: its name with ending, in plain letters, and its bytes. */
+export type FileAnswer = { name: string; content: Buffer };
+
 export type Call<A extends Access, P extends Shape, Q extends Shape, B extends Shape> = {
   actor: A extends "anyone" ? Actor | null : Actor;
   params: Read<P>;
@@ -51,7 +54,11 @@ type AnyCall = {
 };
 
 /** One call of the interface: its address, its schemas, and what it does. Routes and OpenAPI are both made from it. */
-export type Endpoint = Definition<Access, Shape, Shape, Shape, Shape> & { run: (call: AnyCall) => Promise<unknown> };
+export type Endpoint = Definition<Access, Shape, Shape, Shape, Shape> & {
+  /** The media type of the file that it answers with, in place of JSON. */
+  file?: string;
+  run: (call: AnyCall) => Promise<unknown>;
+};
 
 export function endpoint<
   const A extends Access,
@@ -62,6 +69,19 @@ export function endpoint<
 >(
   definition: Definition<A, P, Q, B, R>,
   run: (call: Call<A, P, Q, B>) => Promise<R extends z.ZodType ? z.input<R> : void>,
+): Endpoint {
+  return { ...definition, run: run as Endpoint["run"] };
+}
+
+/** A call that answers with a file, shown by the browser where it can; what it refuses is JSON as everywhere. */
+export function fileEndpoint<
+  const A extends Access,
+  P extends Shape = undefined,
+  Q extends Shape = undefined,
+  B extends Shape = undefined,
+>(
+  definition: Omit<Definition<A, P, Q, B, undefined>, "answer" | "status"> & { file: string },
+  run: (call: Call<A, P, Q, B>) => Promise<FileAnswer>,
 ): Endpoint {
   return { ...definition, run: run as Endpoint["run"] };
 }

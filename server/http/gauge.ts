@@ -7,7 +7,7 @@ import type { Endpoint, Limit } from "./endpoint";
 const limit: Limit = { name: "gauges", points: 1200, perSeconds: 60, by: "address" };
 
 /** Does a computation; what it cannot answer becomes a 422 that points to the field. Its words are fit to be shown. */
-async function inWords<T>(compute: () => T | Promise<T>): Promise<T> {
+export async function inWords<T>(compute: () => T | Promise<T>): Promise<T> {
   try {
     return await compute();
   } catch (error) {

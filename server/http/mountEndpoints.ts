@@ -4,7 +4,7 @@ import type { FieldError } from "#shared/problems";
 import { AppError } from "../errors/AppError";
 import type { Actor } from "../policies/Actor";
 import { requireOwnPage } from "./csrf";
-import type { Endpoint } from "./endpoint";
+import type { Endpoint, FileAnswer } from "./endpoint";
 import { plainWords } from "./plainWords";
 import type { RateLimits } from "./rateLimits";
 
@@ -50,6 +50,11 @@ export function actorOf(req: Request): Actor | null {
   return req.user ?? null;
 }
 
+/** Sends the file of an endpoint that gives one, to be looked at in the browser and kept under its name. */
+function sendFile(type: string, { name, content }: FileAnswer, res: Response): void {
+  res.status(200).type(type).set("Content-Disposition", `inline; filename="${name}"`).send(content);
+}
+
 async function serve(endpoint: Endpoint, limits: RateLimits, req: Request, res: Response): Promise<void> {
   const actor = actorOf(req);
   await limits.spend(endpoint, actor, req);
@@ -69,6 +74,7 @@ async function serve(endpoint: Endpoint, limits: RateLimits, req: Request, res: 
     res,
   });
 
+  if (endpoint.file) return sendFile(endpoint.file, answer as FileAnswer, res);
   if (!endpoint.answer) {
     res.status(204).end();
     return;

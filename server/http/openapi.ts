@@ -18,9 +18,18 @@ const problemAnswer = (description: string) => ({
   content: { "application/problem+json": { schema: ProblemDocument } },
 });
 
+/** What a call answers when all is well. */
+function doneAnswer({ answer, file }: Endpoint) {
+  if (file)
+    return { description: "The file", content: { [file]: { schema: { type: "string", format: "binary" } } } } as const;
+  return answer
+    ? { description: "Done", content: { "application/json": { schema: answer } } }
+    : { description: "Done" };
+}
+
 function operation(endpoint: Endpoint): ZodOpenApiOperationObject {
-  const { params, query, body, answer, access, summary, tag, pure, method } = endpoint;
-  const done = answer ? String(endpoint.status ?? 200) : "204";
+  const { params, query, body, answer, file, access, summary, tag, pure, method } = endpoint;
+  const done = answer || file ? String(endpoint.status ?? 200) : "204";
   return {
     summary,
     tags: [tag],
@@ -38,9 +47,7 @@ function operation(endpoint: Endpoint): ZodOpenApiOperationObject {
       : {}),
     ...(body ? { requestBody: { required: true, content: { "application/json": { schema: body } } } } : {}),
     responses: {
-      [done]: answer
-        ? { description: "Done", content: { "application/json": { schema: answer } } }
-        : { description: "Done" },
+      [done]: doneAnswer(endpoint),
       ...(access === "anyone" ? {} : { 401: problemAnswer("Not signed in") }),
       ...(params ? { 404: problemAnswer("Not there, or not yours") } : {}),
       ...(query || body ? { 422: problemAnswer("Not valid: `errors` names the fields") } : {}),

@@ -13,7 +13,7 @@ const schemaBlock = (name: string, schema: z.ZodType | undefined, io: "input" | 
 const section = (endpoint: Endpoint) => `<section>
 <h3><code>${endpoint.method.toUpperCase()} /api/v1${escaped(endpoint.path)}</code></h3>
 <p>${escaped(endpoint.summary)} ${endpoint.access === "anyone" ? "No sign-in." : endpoint.access === "signed-in" ? "Signed in." : `For: ${endpoint.access.join(", ")}.`}</p>
-${schemaBlock("Address", endpoint.params, "input")}${schemaBlock("Query", endpoint.query, "input")}${schemaBlock("Body", endpoint.body, "input")}${schemaBlock("Answer", endpoint.answer, "output")}
+${schemaBlock("Address", endpoint.params, "input")}${schemaBlock("Query", endpoint.query, "input")}${schemaBlock("Body", endpoint.body, "input")}${schemaBlock("Answer", endpoint.answer, "output")}${endpoint.file ? `<p>Answers with a file: ${escaped(endpoint.file)}.</p>` : ""}
 </section>`;
 
 /** The interface as a page to read, from the same endpoints as the OpenAPI document. It needs no script and no style. */

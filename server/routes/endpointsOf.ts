@@ -9,6 +9,7 @@ import { gaugeRoutes } from "./gauges";
 import { orderRoutes } from "./orders";
 import { partRoutes } from "./parts";
 import { searchRoutes } from "./search";
+import { sheetRoutes } from "./sheets";
 import { workshopRoutes } from "./workshops";
 
 /** Every call of the interface. One that is not listed here is neither served nor described. */
@@ -24,5 +25,6 @@ export function endpointsOf(services: Services): Endpoint[] {
     ...orderRoutes(services),
     ...addressRoutes(),
     ...gaugeRoutes(),
+    ...sheetRoutes(),
   ];
 }

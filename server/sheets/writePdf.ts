@@ -1,23 +1,41 @@
+import { readFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import PDFDocument from "pdfkit";
 import type { PathItem, Sheet, SheetPage, WordsItem } from "#shared/drawing/sheets/Sheet";
+import { sfntOfWoff } from "./sfntOfWoff";
 
 /** PDF's own unit is 1/72 in (ISO 32000-1, 8.3.2.3), and an inch is 25.4 mm. */
 const pointsPerMm = 72 / 25.4;
 const pt = (mm: number) => mm * pointsPerMm;
 
 const require = createRequire(import.meta.url);
-/** Static instances of Work Sans: the variable font's weights do not survive embedding. */
-const fontFile = (weight: 500 | 600) =>
-  require.resolve(`@fontsource/work-sans/files/work-sans-latin-${weight}-normal.woff`);
+/** Static instances of Work Sans: the weights of the variable font do not survive embedding. */
+const fontFiles = {
+  500: require.resolve("@fontsource/work-sans/files/work-sans-latin-500-normal.woff"),
+  600: require.resolve("@fontsource/work-sans/files/work-sans-latin-600-normal.woff"),
+};
+const readFont = (weight: 500 | 600) => sfntOfWoff(readFileSync(fontFiles[weight]));
+let fonts: { 500: Buffer; 600: Buffer } | undefined;
+
+const typeset: PDFKit.Mixins.TextOptions = {
+  lineBreak: false,
+  baseline: "alphabetic",
+  features: ["tnum", "kern", "liga"],
+};
+
 const colours = { ink: "#000000", grey: "#5f5f5f" } as const;
 
 function drawPath(doc: PDFKit.PDFDocument, { steps, strokeMm, isDashed, shade }: PathItem) {
   for (const step of steps) {
-    if (step[0] === "M") doc.moveTo(pt(step[1]), pt(step[2]));
-    else if (step[0] === "L") doc.lineTo(pt(step[1]), pt(step[2]));
-    else if (step[0] === "Z") doc.closePath();
-    else doc.bezierCurveTo(pt(step[1]), pt(step[2]), pt(step[3]), pt(step[4]), pt(step[5]), pt(step[6]));
+    if (step[0] === "Z") doc.closePath();
+    else if (step[0] === "C") {
+      const [, x1, y1, x2, y2, x, y] = step;
+      doc.bezierCurveTo(pt(x1), pt(y1), pt(x2), pt(y2), pt(x), pt(y));
+    } else {
+      const [verb, x, y] = step;
+      if (verb === "M") doc.moveTo(pt(x), pt(y));
+      else doc.lineTo(pt(x), pt(y));
+    }
   }
   if (strokeMm === undefined) {
     doc.fill(colours[shade]);
@@ -30,15 +48,11 @@ function drawPath(doc: PDFKit.PDFDocument, { steps, strokeMm, isDashed, shade }:
 }
 
 function drawWords(doc: PDFKit.PDFDocument, { x, y, content, sizeMm, weight, anchor, turnDeg, shade }: WordsItem) {
-  const options = { lineBreak: false, baseline: "alphabetic", features: ["tnum", "kern", "liga"] } as const;
   doc.font(String(weight)).fontSize(pt(sizeMm)).fillColor(colours[shade]);
-  const before = anchor === "start" ? 0 : doc.widthOfString(content, { ...options, features: [...options.features] });
+  const before = anchor === "start" ? 0 : doc.widthOfString(content, typeset);
   doc.save();
   if (turnDeg !== 0) doc.rotate(turnDeg, { origin: [pt(x), pt(y)] });
-  doc.text(content, pt(x) - (anchor === "middle" ? before / 2 : before), pt(y), {
-    ...options,
-    features: [...options.features],
-  });
+  doc.text(content, pt(x) - (anchor === "middle" ? before / 2 : before), pt(y), typeset);
   doc.restore();
 }
 
@@ -50,22 +64,32 @@ function drawPage(doc: PDFKit.PDFDocument, { widthMm, heightMm, items }: SheetPa
   }
 }
 
+/** Asks viewers to print without scaling (ISO 32000-1, table 150); pdfkit has no option for it. */
+function askForTrueSize(doc: PDFKit.PDFDocument) {
+  const { _root: root } = doc as unknown as {
+    _root: { data: { ViewerPreferences: { data: Record<string, string> } } };
+  };
+  root.data.ViewerPreferences.data.PrintScaling = "None";
+}
+
 /**
  * A sheet as a PDF: vectors and embedded type at true size.
  *
  * Error: coordinates are written to 1e-6 point. The same sheet and time give the same bytes.
  */
 export function writePdf(sheet: Sheet, now: Date): Promise<Buffer> {
+  fonts ??= { 500: readFont(500), 600: readFont(600) };
   const doc = new PDFDocument({
     autoFirstPage: false,
-    font: fontFile(500),
+    // None but the two below.
+    font: "",
     pdfVersion: "1.7",
     lang: "en",
     displayTitle: true,
-    info: { Title: sheet.title, Author: "Idlewright", CreationDate: now },
+    info: { Title: sheet.title, Author: "Idlewright", Creator: "Idlewright", CreationDate: now },
   });
-  for (const weight of [500, 600] as const) doc.registerFont(String(weight), fontFile(weight));
-  // A viewer that honours it prints at true size without being told (ISO 32000-1, 12.2).
+  doc.registerFont("500", fonts[500]).registerFont("600", fonts[600]);
+  askForTrueSize(doc);
   return new Promise((resolve, reject) => {
     const chunks: Buffer[] = [];
     doc.on("data", (chunk: Buffer) => chunks.push(chunk));

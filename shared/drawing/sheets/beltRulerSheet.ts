@@ -1,3 +1,4 @@
+import { DomainError } from "#shared/domain/DomainError";
 import { loopGaugePage } from "./loopGauge";
 import { framedPage, type Room } from "./pageFrame";
 import type { Paper } from "./papers";
@@ -18,6 +19,7 @@ const stripWidth = 31;
 const glueMm = 8;
 /** As many strips as one page holds. */
 export const longestBeltMm = 2 * stripMm * 5;
+export const shortestBeltMm = 50;
 
 /** Marks along one edge of a strip: each is `step` of circumference further, half of that on the paper. */
 function scale(strip: number, left: number, bottom: number, side: 1 | -1, step: number, every: number, unitMm: number) {
@@ -108,9 +110,16 @@ function notes(left: number, top: number, width: number) {
   return { items: columns.flatMap(({ items }) => items), bottom: Math.max(...columns.map(({ bottom }) => bottom)) };
 }
 
-/** Strips to cut out and join, numbered in inside circumference, and on a second page circles for round loops. */
+/**
+ * Strips to cut out and join, numbered in inside circumference, and on a second page circles for round loops.
+ *
+ * Errors: DomainError on "longestMm" outside `shortestBeltMm` to `longestBeltMm`.
+ */
 export function beltRulerSheet({ longestMm, paper }: BeltRulerInput): Sheet {
-  const count = Math.max(1, Math.ceil(longestMm / (2 * stripMm)));
+  if (!(longestMm >= shortestBeltMm && longestMm <= longestBeltMm)) {
+    throw new DomainError("longestMm", `A belt ruler reads up to 50 to ${longestBeltMm} mm.`);
+  }
+  const count = Math.ceil(longestMm / (2 * stripMm));
   const draw = (room: Room): SheetItem[] => {
     const width = room.right - room.besideLeft;
     const height = notes(0, 0, width).bottom;

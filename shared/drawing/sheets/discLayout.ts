@@ -13,6 +13,8 @@ export type Disc = { radiusMm: number; spindleMm: number; mainsHz: number; rings
 
 /** A bar thinner than this runs together in many printers: common practice, no source. */
 const thinnestBarMm = 0.3;
+/** Diameters of a spindle's hole that leave room for the rings, mm. */
+export const spindleLimits = { min: 1, max: 40 };
 const edgeMm = 1.5;
 /** Room for the label outside each ring. */
 const labelMm = 4.4;
@@ -24,7 +26,7 @@ const byBars = (one: StrobeRing, other: StrobeRing) => other.bars - one.bars;
  * A stroboscope disc: the rings of the speeds wanted, those with most bars outside, sharing the room between the hub
  * and the edge. A bar and the gap after it are equally wide.
  *
- * Errors: DomainError on "mainsHz"; on "speeds" where a speed is out of range or its bars would be too thin to print.
+ * Errors: DomainError on "mainsHz"; on "spindleMm" outside `spindleLimits`; on "speeds" where a speed is out of range or its bars would be too thin to print.
  */
 export function layOutDisc(wanted: {
   mainsHz: number;
@@ -33,6 +35,9 @@ export function layOutDisc(wanted: {
   radiusMm: number;
 }): Disc {
   const { mainsHz, speeds, spindleMm, radiusMm } = wanted;
+  if (!(spindleMm >= spindleLimits.min && spindleMm <= spindleLimits.max)) {
+    throw new DomainError("spindleMm", "The hole for the spindle is 1 to 40 mm wide.");
+  }
   const rings = [...new Set(speeds)].flatMap((rpm) => ringsFor(mainsHz, rpm)).sort(byBars);
   const hub = Math.max(17, spindleMm / 2 + 10);
   const pitch = Math.min(deepestBarMm + labelMm, (radiusMm - edgeMm - hub) / Math.max(1, rings.length));

@@ -1,3 +1,4 @@
+import { DomainError } from "#shared/domain/DomainError";
 import { boreGaugePage } from "./boreGauge";
 import { framedPage, roomOf } from "./pageFrame";
 import type { Paper } from "./papers";
@@ -5,6 +6,11 @@ import { arc, circle, line, onCircle } from "./paths";
 import { printError } from "./printError";
 import type { Sheet, SheetItem } from "./Sheet";
 import { column, words } from "./words";
+
+/** Diameter of the largest circle, mm. */
+export const ringGaugeSizes = { min: 20, max: 180 };
+/** Diameters between the fine marks, mm, as they are chosen. */
+export const ringGaugeSteps = ["1", "2", "5"] as const;
 
 export type RingGaugeInput = {
   /** Diameter of the largest circle, mm: whole tens. */
@@ -79,9 +85,16 @@ const notes = (stepMm: number) => ({
   ],
 });
 
-/** Circles to lay a wheel or a ring on, and on a second page two tapered rules for bores. */
+/**
+ * Circles to lay a wheel or a ring on, and on a second page two tapered rules for bores.
+ *
+ * Errors: DomainError on "largestMm" outside `ringGaugeSizes` or no whole ten.
+ */
 export function ringGaugeSheet(input: RingGaugeInput): Sheet {
   const { largestMm, stepMm, paper } = input;
+  if (!(largestMm >= ringGaugeSizes.min && largestMm <= ringGaugeSizes.max) || largestMm % 10 !== 0) {
+    throw new DomainError("largestMm", "The largest circle is 20 to 180 mm, in whole tens.");
+  }
   const room = roomOf(paper);
   const [left, width] = [room.besideLeft, (room.right - room.besideLeft - 6) / 2];
   const { left: use, right: tells } = notes(stepMm);

@@ -7,7 +7,7 @@ import cases from "../../reference/strobe.json";
 type Tolerance = { abs?: number; rel?: number };
 type Case = {
   id: string;
-  inputs: Record<string, number | string>;
+  inputs: Record<string, number | string | undefined>;
   expected: Record<string, unknown>;
   tolerance: Tolerance;
 };
