@@ -31,7 +31,7 @@ export function ORingsPage() {
       lead="Which standard ring serves as a tyre or a belt, and how thin it becomes when it is stretched."
       board={
         <>
-          <RuledHeading>Standard sizes by inside diameter, {unit === "mm" ? "millimetres" : "inches"}</RuledHeading>
+          <RuledHeading>Standard sizes, inside diameter in {unit}</RuledHeading>
           <div className={`gauge-sheet mt-2 ${stale}`}>
             <div ref={place} className="overflow-hidden">
               {good && (

@@ -24,7 +24,7 @@ const uses: Record<RingUse, { words: string; label: string; hint: string }> = {
     hint: "Once around along the bottoms of the grooves.",
   },
   ring: {
-    words: "takes the place of a ring that was measured",
+    words: "replaces a ring that was measured",
     label: "Inside diameter of the old ring",
     hint: "Lying flat and relaxed.",
   },

@@ -14,9 +14,9 @@ export function RingOnSeat({ need, unit, width }: { need: RingNeed; unit: SizeUn
   const height = narrow ? 236 : 280;
   const left = Math.round(width * (narrow ? 0.56 : 0.58));
   const { picked, seatMm, onSeat, use } = need;
-  const isStretched = onSeat.stretchPercent > 0;
+  const isStretched = use !== "ring" && onSeat.stretchPercent > 0;
   const insideMm = isStretched ? seatMm : picked.insideDiameterMm;
-  const outsideMm = insideMm + 2 * onSeat.sectionMm;
+  const outsideMm = insideMm + 2 * (isStretched ? onSeat.sectionMm : picked.sectionMm);
   const widestMm = Math.max(outsideMm, seatMm, picked.insideDiameterMm + 2 * picked.sectionMm);
   const scale = Math.min(left - 24, height - 62) / widestMm;
   const [cx, cy] = [left / 2, 14 + (widestMm * scale) / 2];
@@ -26,7 +26,7 @@ export function RingOnSeat({ need, unit, width }: { need: RingNeed; unit: SizeUn
   const beforeWords = `${roundedSize(picked.insideDiameterMm, unit)} ${unit} inside`;
   const label = isStretched
     ? `Ring ${picked.dash}, ${beforeWords}, stretched by ${onSeat.stretchPercent.toFixed(1)} % to ${roundedSize(seatMm, unit)} ${unit}; its section goes from ${roundedSize(picked.sectionMm, unit)} to ${roundedSize(onSeat.sectionMm, unit)} ${unit}`
-    : `Ring ${picked.dash}, ${beforeWords}, lies loose on ${roundedSize(seatMm, unit)} ${unit}`;
+    : `Ring ${picked.dash}, ${beforeWords}, ${use === "ring" ? "over the old one of" : "loose on"} ${roundedSize(seatMm, unit)} ${unit}`;
 
   return (
     <svg width={width} height={height} className="block" role="img" aria-label={label}>

@@ -2,7 +2,7 @@ import { axisMarks } from "../../../lib/axisMarks";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { RingTicks } from "./RingTicks";
 import { ringLanes, ringView } from "./ringLanes";
-import type { RingNeed } from "./ringNeed";
+import type { RingNeed, RingOffer } from "./ringNeed";
 
 type Props = {
   need: RingNeed;
@@ -20,8 +20,10 @@ const side = 12;
 /** The standard sizes along their inside diameter, true to scale: one lane a section, what is advised as a blue band. */
 export function RingRail({ need, unit, width, litDash, onLight, onPick }: Props) {
   const narrow = width < 560;
-  const lanes = ringLanes(need);
-  const view = ringView(need, lanes, narrow ? 4 : 8);
+  const all = ringLanes(need);
+  const view = ringView(need, all, narrow ? 4 : 8);
+  const isSeen = ({ insideDiameterMm }: RingOffer) => insideDiameterMm >= view.fromMm && insideDiameterMm <= view.toMm;
+  const lanes = all.filter(({ rings }) => rings.some(isSeen));
   const xOf = (mm: number) => side + ((mm - view.fromMm) / (view.toMm - view.fromMm)) * (width - 2 * side);
   const axis = top + lanes.length * laneHeight + 6;
   const [from, to, ideal] = [need.band.fromMm, need.band.toMm, need.idealMm].map(xOf) as [number, number, number];

@@ -1,10 +1,14 @@
 import { classBPlusMinusMm, stretchAdvice } from "#shared/domain/oRingStretch";
+import { stretchPercentOf } from "#shared/domain/oRings";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { LinkButton } from "../../../ui/LinkButton";
 import { Readout } from "../Readout";
 import { RingSize } from "./RingSize";
 import type { RingNeed } from "./ringNeed";
 import { StretchScale } from "./StretchScale";
+
+const oldOne = (mm: number, unit: SizeUnit) =>
+  `${roundedSize(Math.abs(mm), unit)} ${unit} ${mm < 0 ? "smaller" : "larger"}`;
 
 /** What follows from the ring that is drawn. */
 export function RingReadouts({ need, unit }: { need: RingNeed; unit: SizeUnit }) {
@@ -26,9 +30,10 @@ export function RingReadouts({ need, unit }: { need: RingNeed; unit: SizeUnit })
         <p>
           Section <RingSize mm={sectionMm} plusMinusMm={sectionTolMm} unit={unit} both />
         </p>
+        {use === "ring" && <p>{oldOne(insideDiameterMm - seatMm, unit)} inside than the old one.</p>}
       </Readout>
       {use !== "ring" && <Stretch need={need} />}
-      {onSeat.stretchPercent > 0 && (
+      {use !== "ring" && onSeat.stretchPercent > 0 && (
         <Readout label="Section left" value={roundedSize(onSeat.sectionMm, unit)} unit={unit}>
           <p>
             {onSeat.lossPercent.toFixed(1)} % less, by constant volume: what grows longer grows thinner. This is what is
@@ -57,8 +62,11 @@ export function RingReadouts({ need, unit }: { need: RingNeed; unit: SizeUnit })
 }
 
 function Stretch({ need }: { need: RingNeed }) {
-  const { onSeat, use } = need;
+  const { onSeat, use, picked, seatMm } = need;
   const percent = onSeat.stretchPercent;
+  const [least, most] = [1, -1].map((way) =>
+    stretchPercentOf(picked.insideDiameterMm + way * picked.insideDiameterTolMm, seatMm).toFixed(1),
+  );
   const advice = use === "belt" ? stretchAdvice.belt : stretchAdvice.seat;
   const [from, to] = use === "belt" ? [4, 16] : [-2, 8];
   const place =
@@ -72,6 +80,9 @@ function Stretch({ need }: { need: RingNeed }) {
   return (
     <Readout label="Stretch in place" value={percent.toFixed(1)} unit="%">
       <StretchScale percent={percent} advice={advice} from={from} to={to} />
+      <p>
+        From {least} to {most} % over the ring’s tolerance.
+      </p>
       <p>
         <strong className={place === "Inside." ? "text-inband" : "text-outband"}>{place}</strong>{" "}
         {use === "belt"

@@ -1,5 +1,5 @@
 import { roundDecimal } from "#shared/domain/roundDecimal";
-import type { SizeUnit } from "../../../lib/formatSize";
+import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { RuledHeading } from "../../../ui/RuledHeading";
 import { RingSize } from "./RingSize";
 import type { RingNeed } from "./ringNeed";
@@ -12,21 +12,25 @@ type Props = {
   onPick: (dash: string) => void;
 };
 
+const withMinus = (number: string) => number.replace("-", "\u2212");
+const signed = (mm: number, unit: SizeUnit) => `${mm > 0 ? "+" : ""}${withMinus(roundedSize(mm, unit))} ${unit}`;
+
 /** The nearest sizes, nearest first. Each row lights its mark on the rail; its number draws it. */
 export function RingRows({ need, unit, litDash, onLight, onPick }: Props) {
+  const isInPlace = need.use === "ring";
   return (
     <section className="grid gap-2">
       <RuledHeading>Nearest standard sizes</RuledHeading>
       {need.isSectionMissed && (
         <p>No standard ring of about that section comes near this diameter; these are of other sections.</p>
       )}
-      <table className="w-full border-collapse">
+      <table className="w-full border-collapse max-sm:text-small">
         <thead>
           <tr className="border-b border-rule text-left text-small text-soft">
             <th className="py-1.5 pr-3 font-semibold">size</th>
             <th className="py-1.5 pr-3 font-semibold">inside diameter</th>
             <th className="py-1.5 pr-3 font-semibold">section</th>
-            <th className="py-1.5 text-right font-semibold">stretch</th>
+            <th className="py-1.5 text-right font-semibold">{isInPlace ? "than the old one" : "stretch"}</th>
           </tr>
         </thead>
         <tbody>
@@ -58,7 +62,9 @@ export function RingRows({ need, unit, litDash, onLight, onPick }: Props) {
               </td>
               <td className={`py-1.5 text-right whitespace-nowrap ${ring.isInside ? "font-semibold text-inband" : ""}`}>
                 {ring.isInside && "● "}
-                {roundDecimal(ring.stretchPercent, 1).replace("-", "\u2212")} %
+                {isInPlace
+                  ? signed(ring.insideDiameterMm - need.seatMm, unit)
+                  : `${withMinus(roundDecimal(ring.stretchPercent, 1))} %`}
               </td>
             </tr>
           ))}

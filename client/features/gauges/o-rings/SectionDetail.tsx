@@ -16,7 +16,9 @@ export function SectionDetail({ need, unit, hatchId, ringScale, box }: Props) {
   const room = Math.min(box.width - 72, box.height - 128);
   const magnified = Math.max(1, Math.floor(room / (picked.sectionMm * ringScale)));
   const scale = ringScale * magnified;
-  const [before, after] = [(picked.sectionMm / 2) * scale, (onSeat.sectionMm / 2) * scale];
+  // A ring that takes the place of another is not on anything here.
+  const drawnMm = use === "ring" ? picked.sectionMm : onSeat.sectionMm;
+  const [before, after] = [(picked.sectionMm / 2) * scale, (drawnMm / 2) * scale];
   const cx = box.x + box.width / 2;
   const seatY = 24 + 2 * before + Math.max(0, (box.height - 128 - 2 * before) / 2);
   const half = Math.min(box.width / 2 - 8, before + 34);
@@ -52,11 +54,12 @@ export function SectionDetail({ need, unit, hatchId, ringScale, box }: Props) {
       />
       <text x={cx} y={seatY + depth + 20} textAnchor="middle" fontSize={13.3} fill="var(--color-ink)">
         <tspan fontWeight={600}>
-          {roundedSize(picked.sectionMm, unit)} → {roundedSize(onSeat.sectionMm, unit)} {unit}
+          {onSeat.stretchPercent > 0 && use !== "ring" && `${roundedSize(picked.sectionMm, unit)} → `}
+          {roundedSize(drawnMm, unit)} {unit}
         </tspan>
       </text>
       <text x={cx} y={seatY + depth + 38} textAnchor="middle" fontSize={13.3} fill="var(--color-soft)">
-        {magnified > 1 ? `section, drawn ${magnified} × the ring` : "section, at the ring’s scale"}
+        {magnified > 1 ? `section, ${magnified} × the ring` : "section, as the ring"}
       </text>
     </g>
   );

@@ -46,7 +46,7 @@ export const oRingCodec = {
       use,
       sizes: { ...example.sizes, ...(reads(size) ? { [use]: size } : {}) },
       section: optional("section"),
-      groove: optional("groove"),
+      groove: use === "belt" ? optional("groove") : example.groove,
       pick: /^\d{3}$/.test(pick) ? pick : "",
     };
   },

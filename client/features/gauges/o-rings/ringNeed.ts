@@ -86,7 +86,7 @@ export function ringNeed(state: ORingState, unit: SizeUnit): { need: RingNeed | 
     const near = nearRings(want.idealMm, section.mm);
     const isSectionMissed = near.length === 0;
     const rows = (isSectionMissed ? nearRings(want.idealMm, undefined) : near).map(offer);
-    const picked = all.find(({ dash }) => dash === state.pick) ?? rows[0]!;
+    const picked = all.find(({ dash }) => dash === state.pick) ?? rows.find(({ isInside }) => isInside) ?? rows[0]!;
     if (!rows.some(({ dash }) => dash === picked.dash)) rows.push(picked);
     const { insideDiameterMm, sectionMm } = picked;
     const onSeat = oRingOnSeat({ insideDiameterMm, sectionMm, seatMm: want.seatMm });
