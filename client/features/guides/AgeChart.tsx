@@ -18,7 +18,7 @@ export function AgeChart({ kind, dimension, sizeMm }: Props) {
   const count = Math.floor(reach / step);
   const ticks = Array.from({ length: 2 * count + 1 }, (_, i) => (i - count) * step);
   return (
-    <div className="h-full border border-rule bg-sheet px-3 py-3 print:break-inside-avoid">
+    <div className="border border-rule bg-sheet px-3 py-3 print:break-inside-avoid">
       <div ref={place}>
         <ul className="grid gap-2.5">
           {rows.map((row) => (

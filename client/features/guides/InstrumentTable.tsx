@@ -42,7 +42,7 @@ function Row({ instrument, sizesMm, inside = false }: RowProps) {
     <tr className="border-t border-rule align-baseline">
       <th scope="row" className="py-1.5 pr-2 font-normal">
         {capitalised(name)}
-        {inside && <span className="text-small text-soft"> inside jaws</span>}
+        {inside && <span className="text-small text-soft">, inside jaws</span>}
       </th>
       <td className="py-1.5 pl-2 text-right">{stepMm}</td>
       {sizesMm.map((size) => (

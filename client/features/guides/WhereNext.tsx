@@ -35,7 +35,7 @@ export function WhereNext({ kinds }: { kinds: readonly PartKind[] }) {
       <ul className="grid gap-x-10 sm:grid-cols-2">
         {ways.map(({ to, words }) => (
           <li key={to}>
-            <Link to={to} className="inline-flex min-h-8 items-center">
+            <Link to={to} className="inline-flex min-h-8 items-center py-1">
               {words}
             </Link>
           </li>

@@ -18,7 +18,7 @@ export function WorkedExample() {
     <ol className="grid max-w-3xl list-decimal gap-4 pl-6 marker:font-semibold">
       <li>
         <b>Read.</b> An idler gone hard, three times round with a digital calliper:{" "}
-        {readings.outsideDiameter.join(", ")} mm. Mean {mm(asFound.valueMm)}.
+        {readings.outsideDiameter.map((reading) => roundDecimal(reading, 2)).join(", ")} mm. Mean {mm(asFound.valueMm)}.
       </li>
       <li>
         <b>How far that may be off.</b> Standard uncertainties, in mm:
