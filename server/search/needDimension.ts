@@ -2,9 +2,9 @@ import { type AcceptedBand, defaultBand } from "#shared/domain/acceptedBands";
 import type { Condition } from "#shared/domain/conditions";
 import type { Instrument } from "#shared/domain/instruments";
 import { formatLength } from "#shared/domain/length";
-import type { WrittenSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionWords, type PartKind } from "#shared/domain/partKinds";
 import { sizeAsNew } from "#shared/domain/sizeAsNew";
+import type { WrittenSize } from "#shared/domain/writtenSize";
 import type { NeedDimension } from "#shared/schemas/need";
 import type { RegisterSize } from "./familyRegister";
 

@@ -1,26 +1,15 @@
 import { formatLength, type ParsedLength, parseLength } from "./length";
 import { unitNamed } from "./lengthUnits";
 import { meanOf } from "./uncertainty";
+import { isWorkedOut, plusMinus, sizeLimits, type WrittenSize } from "./writtenSize";
 
-type Refusal = { ok: false; problem: string };
-/** One reading or several; `mm` is their mean, and the coarsest rounding counts for all. */
-type ReadSize = { ok: true; mm: number; readingsMm: readonly number[]; roundedToMm: number; echo: string };
-/** Not measured: known to lie within `plusMinusMm` of `mm`. */
-type WorkedOutSize = { ok: true; mm: number; plusMinusMm: number; echo: string };
-export type WrittenSize = ReadSize | WorkedOutSize;
-export type ParsedSize = WrittenSize | Refusal;
+export type ParsedSize = WrittenSize | { ok: false; problem: string };
 type Length = Extract<ParsedLength, { ok: true }>;
 type Unit = "mm" | "in";
 
-export const sizeLimits = { readings: 12, characters: 160 };
-
 const separator = /[;\n\r]/;
-const plusMinus = /±|\+\s*[/\u2044\u2215]?\s*[-\u2010-\u2015\u2212]/;
 const unitAtEnd = /[^\d\s.,/¼-¾⅐-⅞-]+\.?\s*$/;
-const refuse = (problem: string): Refusal => ({ ok: false, problem });
-
-/** Whether a text speaks of a size that was worked out (532 ± 8 mm); it may still be unclear. */
-export const isWorkedOut = (text: string): boolean => plusMinus.test(text);
+const refuse = (problem: string): ParsedSize => ({ ok: false, problem });
 
 /** The length as it was written, in its own unit: "20.9 in". */
 const written = ({ echo }: Length) => echo.replace(/ = .*/, "");

@@ -3,8 +3,8 @@ import { conditionFacts, conditionProblem } from "./conditions";
 import { DomainError } from "./DomainError";
 import { traitsOf } from "./dimensionTraits";
 import { formatLength } from "./length";
-import type { WrittenSize } from "./parseSize";
 import { type Contribution, rectangular } from "./uncertainty";
+import type { WrittenSize } from "./writtenSize";
 
 export type SizeAsNew = {
   /** Mean of the readings; null where nothing was measured. */

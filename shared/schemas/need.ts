@@ -1,8 +1,8 @@
 import { z } from "zod";
 import { conditions } from "../domain/conditions";
 import { instruments } from "../domain/instruments";
-import { sizeLimits } from "../domain/parseSize";
 import { dimensionNames } from "../domain/partKinds";
+import { sizeLimits } from "../domain/writtenSize";
 import { CountryCode, Slug } from "./common";
 import { DimensionName, PartKind } from "./part";
 

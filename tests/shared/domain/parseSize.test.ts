@@ -1,7 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { longestLengthMm, parseLength } from "#shared/domain/length";
-import { isWorkedOut, type ParsedSize, parseSize, sizeLimits } from "#shared/domain/parseSize";
+import { type ParsedSize, parseSize } from "#shared/domain/parseSize";
+import { isWorkedOut, sizeLimits } from "#shared/domain/writtenSize";
 
 function read(text: string, defaultUnit: "mm" | "in" = "mm"): Extract<ParsedSize, { ok: true }> {
   const parsed = parseSize(text, defaultUnit);
