@@ -1,7 +1,7 @@
 import { type Condition, conditionFacts, conditionsFor } from "#shared/domain/conditions";
 import { type Instrument, instruments } from "#shared/domain/instruments";
-import { parseLength } from "#shared/domain/length";
 import { type DimensionName, dimensionsOf, kindFacts, type PartKind, partKinds } from "#shared/domain/partKinds";
+import { isWorkedOut } from "#shared/domain/writtenSize";
 import type { SizeUnit } from "./formatSize";
 
 /** A need as it is written into the measure strip. */
@@ -42,7 +42,10 @@ export function readNeed(params: URLSearchParams, defaults: NeedDefaults): NeedV
   };
 }
 
-/** The address of a need: only what was said, in the order in which it is said. */
+/**
+ * The address of a need: only what was said, in the order in which it is said. Where no part is left, what was read from
+ * one is not said; what was worked out is.
+ */
 export function needParams(values: NeedValues): URLSearchParams {
   const params = new URLSearchParams();
   const put = (name: string, value: string | undefined, otherwise = "") => {
@@ -50,10 +53,12 @@ export function needParams(values: NeedValues): URLSearchParams {
   };
   const words = values.q.trim();
   const measured = conditionFacts[values.condition].hasReadings;
-  const texts = dimensionsOf(values.kind).map((name) => [name, values.lengths[name]?.trim()] as const);
-  const anySize = measured && texts.some(([, text]) => text);
-  if (anySize || values.family || !words) params.set("kind", values.kind);
-  if (measured) for (const [name, text] of texts) put(name, text);
+  const sizes = dimensionsOf(values.kind).flatMap((name) => {
+    const text = values.lengths[name]?.trim();
+    return text && (measured || isWorkedOut(text)) ? [[name, text] as const] : [];
+  });
+  if (sizes.length > 0 || values.family || !words) params.set("kind", values.kind);
+  for (const [name, text] of sizes) params.set(name, text);
   put("instrument", values.instrument, "digital-caliper");
   put("condition", values.condition, "sound");
   put("family", values.family);
@@ -70,20 +75,8 @@ export function needOnly(params: URLSearchParams): URLSearchParams {
   return kept;
 }
 
-/** Another unit to read in, without changing what any length means: bare numbers get their unit written out. */
-export function withUnit(params: URLSearchParams, from: SizeUnit, to: SizeUnit): URLSearchParams {
-  const next = new URLSearchParams(params);
-  for (const kind of partKinds) {
-    for (const name of dimensionsOf(kind)) {
-      const text = next.get(name);
-      if (!text) continue;
-      const [now, then] = [parseLength(text, from), parseLength(text, to)];
-      if (now.ok && !(then.ok && then.mm === now.mm)) next.set(name, `${text.trim()} ${from}`);
-    }
-  }
-  next.set("unit", to);
-  return next;
-}
-
 /** The dimension that the size rail runs along. */
 export const primaryOf = (kind: PartKind): DimensionName => kindFacts[kind].primary;
+
+/** Whether its length can be told from its pulleys, or from it lying flat: a belt of any kind. */
+export const isBelt = (kind: PartKind): boolean => primaryOf(kind) === "insideCircumference";

@@ -1,6 +1,9 @@
 import "@testing-library/jest-dom/vitest";
-import { cleanup } from "@testing-library/react";
+import { cleanup, configure } from "@testing-library/react";
 import { afterEach } from "vitest";
+
+// Generous, since it passes as soon as it has come: a busy machine is no failure.
+configure({ asyncUtilTimeout: 10_000 });
 
 // What jsdom leaves out of the browser: modal dialogs and scrolling.
 if (!HTMLDialogElement.prototype.showModal) {

@@ -1,8 +1,8 @@
 import { Link, useSearchParams } from "react-router-dom";
 import type { PartPage } from "#shared/schemas/catalogue";
 import { roundedSize, type SizeUnit } from "../../lib/formatSize";
-import { withUnit } from "../../lib/needParams";
 import { keepUnit } from "../../lib/preferences";
+import { withUnit } from "../../lib/withUnit";
 import { DimensionLabel } from "../../ui/DimensionLabel";
 import { KitDrawing } from "../../ui/drawing/KitDrawing";
 import { PartDrawing } from "../../ui/drawing/PartDrawing";

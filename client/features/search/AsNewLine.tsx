@@ -1,34 +1,26 @@
-import { type AsNewEstimate, estimateAsNew } from "#shared/domain/asNew";
-import { conditionFacts } from "#shared/domain/conditions";
 import { DomainError } from "#shared/domain/DomainError";
-import { parseLength } from "#shared/domain/length";
+import { parseSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionWords } from "#shared/domain/partKinds";
+import { type SizeAsNew, sizeAsNew } from "#shared/domain/sizeAsNew";
+import type { WrittenSize } from "#shared/domain/writtenSize";
 import { roundedSize, type SizeUnit } from "../../lib/formatSize";
 import { type NeedValues, primaryOf } from "../../lib/needParams";
 import { Disclosure } from "../../ui/Disclosure";
 
-type Line = { name: DimensionName; estimate: AsNewEstimate };
+type Line = { name: DimensionName; size: WrittenSize; estimate: SizeAsNew };
 
-function estimateFor({ kind, lengths, unit, instrument, condition }: NeedValues, name: DimensionName) {
-  const read = parseLength(lengths[name] ?? "", unit);
-  if (!read.ok) return null;
+function lineFor({ kind, lengths, unit, instrument, condition }: NeedValues, name: DimensionName): Line[] {
+  const size = parseSize(lengths[name] ?? "", unit);
+  if (!size.ok) return [];
   try {
-    const { mm, roundedToMm } = read;
-    return estimateAsNew({
-      kind,
-      dimension: name,
-      readingsMm: [mm],
-      resolutionMm: roundedToMm,
-      instrument,
-      condition,
-    });
+    return [{ name, size, estimate: sizeAsNew(size, { kind, dimension: name, instrument, condition }) }];
   } catch (error) {
-    if (error instanceof DomainError) return null;
+    if (error instanceof DomainError) return [];
     throw error;
   }
 }
 
-function Figure({ estimate, unit }: { estimate: AsNewEstimate; unit: SizeUnit }) {
+function Figure({ estimate, unit }: { estimate: SizeAsNew; unit: SizeUnit }) {
   const { valueMm, standardUncertaintyMm } = estimate.asNew;
   return (
     <strong className="font-semibold whitespace-nowrap text-measured">
@@ -37,25 +29,24 @@ function Figure({ estimate, unit }: { estimate: AsNewEstimate; unit: SizeUnit })
   );
 }
 
+/** "Flat spot: the readings differ by 0.30 mm." Where the readings show none, nothing. */
+function flatSpotWords({ size, estimate }: Line, unit: SizeUnit): string | null {
+  if (!estimate.flatSpot || !("readingsMm" in size) || size.readingsMm.length < 3) return null;
+  const range = Math.max(...size.readingsMm) - Math.min(...size.readingsMm);
+  return `Flat spot: the readings differ by ${roundedSize(range, unit)} ${unit}`;
+}
+
 /** How large the part was when new, worked out as it is written, and why. */
 export function AsNewLine({ values, shown }: { values: NeedValues; shown: readonly DimensionName[] }) {
-  const { condition, unit, kind } = values;
-  if (!conditionFacts[condition].hasReadings) {
-    return (
-      <p className="text-soft">
-        Nothing is left to measure on a {condition} part: choose the mechanism, and its register gives the sizes.
-      </p>
-    );
-  }
-  const lines: Line[] = shown.flatMap((name) => {
-    const estimate = estimateFor(values, name);
-    return estimate ? [{ name, estimate }] : [];
-  });
+  const { unit, kind } = values;
+  const lines = shown.flatMap((name) => lineFor(values, name));
   if (lines.length === 0) {
     return <p className="text-soft">Not a length yet: write it like 44.1, 44,1 mm, 1.736 in or 1-47/64.</p>;
   }
-  const first = lines.find(({ name }) => name === primaryOf(kind));
+  const measured = lines.filter(({ size }) => "readingsMm" in size);
+  const first = measured.find(({ name }) => name === primaryOf(kind));
   const wear = first?.estimate.budget.find(({ name }) => name === "condition");
+  const flatSpots = measured.flatMap((line) => flatSpotWords(line, unit) ?? []);
   return (
     <div className="flex flex-wrap gap-x-6 gap-y-1 text-soft">
       {first && (
@@ -63,14 +54,18 @@ export function AsNewLine({ values, shown }: { values: NeedValues; shown: readon
           As new it was about <Figure estimate={first.estimate} unit={unit} />
         </p>
       )}
+      {flatSpots.map((words) => (
+        <p key={words}>{words}</p>
+      ))}
       {wear && <p>{wear.words}</p>}
-      {lines
+      {measured
         .filter((line) => line !== first)
         .map(({ name, estimate }) => (
           <p key={name}>
             {dimensionWords[name]} <Figure estimate={estimate} unit={unit} />
           </p>
         ))}
+      {measured.length < lines.length && <p>What was worked out is taken as it stands, without correction</p>}
       <Disclosure summary="why" className="max-w-full open:w-full">
         <ul className="grid max-w-prose gap-4 pb-2">
           {lines.map(({ name, estimate }) => (

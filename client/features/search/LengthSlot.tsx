@@ -1,44 +1,65 @@
-import { type CSSProperties, useState } from "react";
-import { parseLength } from "#shared/domain/length";
+import { type CSSProperties, useRef, useState } from "react";
+import { flushSync } from "react-dom";
+import type { ParsedSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionWords } from "#shared/domain/partKinds";
-import type { SizeUnit } from "../../lib/formatSize";
+import { isWorkedOut, sizeLimits } from "#shared/domain/writtenSize";
 import { DimensionLabel } from "../../ui/DimensionLabel";
 
 export const slotId = (name: DimensionName): string => `strip-${name}`;
+const workedOut = "worked out as ";
 
-/** What was understood, where it says more than what was written. */
-export function echoBeside(text: string, unit: SizeUnit): string {
+/** What was understood, where it says more than what was written; and whether another reading can follow. */
+function understood(text: string, size: ParsedSize | undefined): { echo: string; canGoOn: boolean } {
   const written = text.trim();
-  const read = written ? parseLength(written, unit) : undefined;
-  if (!read?.ok || read.echo === written) return "";
-  return read.echo.startsWith(`${written} `) ? read.echo.slice(written.length + 1) : read.echo;
+  if (!size?.ok) return { echo: "", canGoOn: false };
+  const whole = size.echo.replace(workedOut, "");
+  const echo = whole.startsWith(`${written} `) ? whole.slice(written.length + 1) : whole;
+  return {
+    echo: echo === written ? "" : echo,
+    canGoOn: "readingsMm" in size && size.readingsMm.length < sizeLimits.readings && !written.endsWith(";"),
+  };
 }
 
 type Props = {
   name: DimensionName;
   text: string;
-  unit: SizeUnit;
+  /** What was understood of it; undefined where nothing is written, or what reads it is still on its way. */
+  size: ParsedSize | undefined;
   problem: string | undefined;
   example: string;
+  /** Whether an instrument was put to a part; else only what was worked out can be written. */
+  isMeasured: boolean;
   onText: (text: string) => void;
   /** Takes the size out of the sentence; the primary one stays. */
   onRemove?: (() => void) | undefined;
 };
 
 /** One size in the sentence: its name, the length as one writes it, and what was understood. */
-export function LengthSlot({ name, text, unit, problem, example, onText, onRemove }: Props) {
-  const [isSettled, setSettled] = useState(false);
+export function LengthSlot({ name, text, size, problem, example, isMeasured, onText, onRemove }: Props) {
+  // What is wrong from the start came with the address, and is not being written.
+  const [isSettled, setSettled] = useState(problem !== undefined);
+  const input = useRef<HTMLInputElement>(null);
   const id = slotId(name);
   const shownProblem = isSettled ? problem : undefined;
-  const echo = echoBeside(text, unit);
+  const { echo, canGoOn } = understood(text, size);
   const width = { "--slot-width": `${Math.max(text.length, example.length) + 1}ch` } as CSSProperties;
+
+  const goOn = () => {
+    const longer = `${text.trim()}; `;
+    flushSync(() => onText(longer));
+    input.current?.focus();
+    input.current?.setSelectionRange(longer.length, longer.length);
+  };
+
   return (
-    <span className="inline-flex max-w-full flex-col align-baseline">
+    <span className="strip-size">
       <span>
         <label htmlFor={id} className="text-soft">
           <DimensionLabel name={name} />{" "}
         </label>
+        {(!isMeasured || isWorkedOut(text)) && workedOut}
         <input
+          ref={input}
           id={id}
           name={name}
           type="text"
@@ -47,7 +68,7 @@ export function LengthSlot({ name, text, unit, problem, example, onText, onRemov
           autoComplete="off"
           autoCapitalize="off"
           spellCheck={false}
-          maxLength={60}
+          maxLength={sizeLimits.characters}
           className="slot slot-measured"
           style={width}
           aria-invalid={shownProblem ? true : undefined}
@@ -59,6 +80,11 @@ export function LengthSlot({ name, text, unit, problem, example, onText, onRemov
         <span id={`${id}-echo`} className="strip-echo">
           {echo}
         </span>
+        {canGoOn && isMeasured && (
+          <button type="button" className="strip-more" onClick={goOn}>
+            + reading <span className="sr-only">of the {dimensionWords[name]}</span>
+          </button>
+        )}
         {onRemove && (
           <button
             type="button"

@@ -1,23 +1,23 @@
 import { useQuery } from "@tanstack/react-query";
-import { type FormEvent, lazy, type ReactNode, Suspense, useEffect, useRef } from "react";
+import { type FormEvent, type ReactNode, useEffect, useRef } from "react";
 import { flushSync } from "react-dom";
 import { useLocation, useNavigate } from "react-router-dom";
 import { type Condition, conditionFacts, conditionsFor } from "#shared/domain/conditions";
 import { countryName } from "#shared/domain/countries";
 import { type Instrument, instrumentFacts, instruments } from "#shared/domain/instruments";
-import { type DimensionName, dimensionWords, kindFacts, type PartKind, partKinds } from "#shared/domain/partKinds";
+import { type DimensionName, kindFacts, type PartKind, partKinds } from "#shared/domain/partKinds";
 import { countriesQuery, familiesQuery } from "../../lib/catalogue";
 import { offerStrip } from "../../lib/focusStrip";
 import { type NeedValues, needParams, primaryOf } from "../../lib/needParams";
 import { keepShipTo } from "../../lib/preferences";
+import { useSizeReader } from "../../lib/sizeReader";
 import { Button } from "../../ui/Button";
-import { LengthSlot, slotId } from "./LengthSlot";
+import { slotId } from "./LengthSlot";
+import { StripNotes } from "./StripNotes";
 import { StripSelect } from "./StripSelect";
+import { StripSizes } from "./StripSizes";
 import { useSlashKey } from "./useSlashKey";
-import { lengthProblems, useStrip } from "./useStrip";
-
-// What it works out is not needed until something is written; fetched apart, it leaves the first page lighter.
-const AsNewLine = lazy(async () => ({ default: (await import("./AsNewLine")).AsNewLine }));
+import { sizesAsRead, useStrip } from "./useStrip";
 
 export type StripLook = "large" | "plain" | "compact";
 
@@ -31,23 +31,20 @@ type Props = {
   aside?: ReactNode;
 };
 
-const examples: Partial<Record<DimensionName, string>> = { insideCircumference: "532 mm", outsideDiameter: "44.1 mm" };
-const exampleOf = (name: DimensionName) => examples[name] ?? "4.0 mm";
 const article = (words: string) => (/^[aeiou]/.test(words) ? "an" : "a");
 
 /** The need as one sentence. Enter searches; all of it goes into the address. A plain GET form underneath. */
 export function MeasureStrip({ initial, look, action, submitWords, aside }: Props) {
   const strip = useStrip(initial);
-  const { values, shown, closed } = strip;
+  const { values, shown, isMeasured } = strip;
   const { kind, condition, instrument, family, shipTo } = values;
   const families = useQuery(familiesQuery).data?.items ?? [];
   const countries = useQuery(countriesQuery).data?.items ?? [];
   const navigate = useNavigate();
   const location = useLocation();
   const form = useRef<HTMLFormElement>(null);
-  const problems = lengthProblems(values);
-  const isMeasured = conditionFacts[condition].hasReadings;
-  const isWritten = !isMeasured || shown.some((name) => values.lengths[name]);
+  const { read, fetchRead } = useSizeReader(Object.keys(initial.lengths).length > 0);
+  const sizes = sizesAsRead(values, read);
   const large = look === "large";
 
   const focusSize = (name: DimensionName) => {
@@ -61,9 +58,10 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   latestFocus.current = focusSize;
   useEffect(() => offerStrip((name) => latestFocus.current(name)), []);
 
-  const submit = (event: FormEvent) => {
+  const submit = async (event: FormEvent) => {
     event.preventDefault();
-    const wrong = isMeasured ? shown.find((name) => problems[name]) : undefined;
+    const asRead = sizesAsRead(values, read ?? (await fetchRead()));
+    const wrong = shown.find((name) => asRead[name]?.problem);
     if (wrong) {
       const field = document.getElementById(slotId(wrong));
       field?.focus();
@@ -77,7 +75,15 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   const familyName = families.find(({ slug }) => slug === family)?.name ?? family;
   return (
     <search className="block border-b border-rule bg-sheet print:hidden">
-      <form ref={form} action={action} method="get" onSubmit={submit} className={`page strip strip-${look}`} noValidate>
+      <form
+        ref={form}
+        action={action}
+        method="get"
+        onFocus={read ? undefined : () => void fetchRead()}
+        onSubmit={(event) => void submit(event)}
+        className={`page strip strip-${look}`}
+        noValidate
+      >
         <div className="strip-sentence">
           {look !== "compact" && `I need ${article(kindFacts[kind].name)} `}
           <StripSelect
@@ -93,42 +99,9 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
               </option>
             ))}
           </StripSelect>
+          <StripSizes strip={strip} isCompact={look === "compact"} sizes={sizes} onFocus={focusSize} />
           {isMeasured && (
             <>
-              {look !== "compact" && " measuring "}
-              {shown.map((name) => (
-                <span key={name}>
-                  {name !== shown[0] || look === "compact" ? ", " : ""}
-                  <LengthSlot
-                    name={name}
-                    text={values.lengths[name] ?? ""}
-                    unit={values.unit}
-                    problem={problems[name]}
-                    example={exampleOf(name)}
-                    onText={(text) => strip.setLength(name, text)}
-                    onRemove={name === primaryOf(kind) ? undefined : () => strip.closeSize(name)}
-                  />
-                </span>
-              ))}
-              {closed.length > 0 && (
-                <>
-                  {", "}
-                  <StripSelect
-                    label="Add a size"
-                    value=""
-                    shownText="+ size"
-                    className="slot-soft"
-                    onChange={(event) => focusSize(event.target.value as DimensionName)}
-                  >
-                    <option value="">+ size</option>
-                    {closed.map((name) => (
-                      <option key={name} value={name}>
-                        {dimensionWords[name]}
-                      </option>
-                    ))}
-                  </StripSelect>
-                </>
-              )}
               {look === "compact" ? ", " : " taken with a "}
               <StripSelect
                 label="Measured with"
@@ -151,7 +124,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
             name="condition"
             value={condition}
             shownText={conditionFacts[condition].name}
-            onChange={(event) => strip.set({ condition: event.target.value as Condition })}
+            onChange={(event) => strip.setCondition(event.target.value as Condition)}
           >
             {conditionsFor(kind).map((name) => (
               <option key={name} value={name}>
@@ -199,17 +172,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
         </div>
         {aside}
         <div className={`strip-notes ${look === "compact" ? "hidden" : ""}`}>
-          {isWritten ? (
-            <div className="min-h-7">
-              <Suspense fallback={null}>
-                <AsNewLine values={values} shown={shown} />
-              </Suspense>
-            </div>
-          ) : (
-            <p className="text-soft">
-              Write sizes as you read them: 44.1, 44,1 mm, 1.736 in, 1-47/64, 750 thou. Wear is reckoned in for you.
-            </p>
-          )}
+          <StripNotes strip={strip} />
           <label className="flex items-baseline gap-x-2 whitespace-nowrap text-soft">
             Or words
             <input

@@ -1,8 +1,8 @@
 import type { ReactNode } from "react";
 import { Link, useSearchParams } from "react-router-dom";
 import type { SizeUnit } from "../../lib/formatSize";
-import { withUnit } from "../../lib/needParams";
 import { keepUnit } from "../../lib/preferences";
+import { withUnit } from "../../lib/withUnit";
 import { Disclosure } from "../../ui/Disclosure";
 import { offerNames } from "../../ui/offerWords";
 import { materials, offerTypes } from "./filterNames";

@@ -1,3 +1,4 @@
+import { Suspense } from "react";
 import { Link, useLocation, useSearchParams } from "react-router-dom";
 import { needOnly, needParams, readNeed } from "../../lib/needParams";
 import { useShipTo, useUnit } from "../../lib/preferences";
@@ -32,13 +33,15 @@ export function StripBar() {
   const initial = place === "families" && name ? { ...read, family: name } : read;
   // Another need in the address is another sentence; what is typed meanwhile stays as long as the address does.
   return (
-    <MeasureStrip
-      key={`${place}?${needParams(initial)}`}
-      initial={initial}
-      look={looks[place] ?? "compact"}
-      action={isPart ? pathname : "/find"}
-      submitWords={isPart ? "Check" : "Find"}
-      aside={isPart && <BackToResults />}
-    />
+    <Suspense fallback={null}>
+      <MeasureStrip
+        key={`${place}?${needParams(initial)}`}
+        initial={initial}
+        look={looks[place] ?? "compact"}
+        action={isPart ? pathname : "/find"}
+        submitWords={isPart ? "Check" : "Find"}
+        aside={isPart && <BackToResults />}
+      />
+    </Suspense>
   );
 }

@@ -1,30 +1,46 @@
 import { useState } from "react";
-import { type Condition, conditionsFor } from "#shared/domain/conditions";
-import { parseLength } from "#shared/domain/length";
+import { type Condition, conditionFacts, conditionsFor } from "#shared/domain/conditions";
+import type { ParsedSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionsOf, type PartKind } from "#shared/domain/partKinds";
+import { isWorkedOut } from "#shared/domain/writtenSize";
 import { type NeedValues, primaryOf } from "../../lib/needParams";
+import type { SizeReader } from "../../lib/sizeReader";
 
-export type LengthProblems = Partial<Record<DimensionName, string>>;
+export type SizesAsRead = Partial<Record<DimensionName, { size: ParsedSize; problem: string | undefined }>>;
 
-/** What is wrong with the lengths as written, in words; empty ones are not wrong. */
-export function lengthProblems({ kind, lengths, unit }: NeedValues): LengthProblems {
-  const problems: LengthProblems = {};
+/** What is understood of the sizes as written, and what is wrong with each in words; empty ones are not wrong. */
+export function sizesAsRead({ kind, lengths, unit, condition }: NeedValues, read: SizeReader | undefined): SizesAsRead {
+  const sizes: SizesAsRead = {};
   for (const name of dimensionsOf(kind)) {
     const text = lengths[name]?.trim();
-    const read = text ? parseLength(text, unit) : undefined;
-    if (read && !read.ok) problems[name] = read.problem;
+    if (!text || !read) continue;
+    const size = read(text, unit);
+    const isOfNothing = size.ok && "readingsMm" in size && !conditionFacts[condition].hasReadings;
+    const words = `A ${condition} part cannot be measured. Write what was worked out, with a ± behind it, or choose another condition.`;
+    sizes[name] = { size, problem: size.ok ? (isOfNothing ? words : undefined) : size.problem };
   }
-  return problems;
+  return sizes;
 }
 
 /** What the strip holds while it is being written: the need, and which sizes stand open. */
 export function useStrip(initial: NeedValues) {
   const [values, setValues] = useState(initial);
   const [open, setOpen] = useState<DimensionName[]>(() => Object.keys(initial.lengths) as DimensionName[]);
-  const shown = dimensionsOf(values.kind).filter((name) => name === primaryOf(values.kind) || open.includes(name));
+  const isMeasured = conditionFacts[values.condition].hasReadings;
+  const shown = dimensionsOf(values.kind).filter(
+    (name) => (isMeasured && name === primaryOf(values.kind)) || open.includes(name),
+  );
+
+  /** Readings step aside while no part is left to have been measured, and come back with it. */
+  const openFor = ({ lengths, condition }: NeedValues) => {
+    const { hasReadings } = conditionFacts[condition];
+    const texts = Object.entries(lengths) as [DimensionName, string | undefined][];
+    setOpen(texts.flatMap(([name, text]) => (text && (hasReadings || isWorkedOut(text)) ? [name] : [])));
+  };
 
   return {
     values,
+    isMeasured,
     shown,
     closed: dimensionsOf(values.kind).filter((name) => !shown.includes(name)),
     set: (change: Partial<NeedValues>) => setValues((now) => ({ ...now, ...change })),
@@ -32,6 +48,11 @@ export function useStrip(initial: NeedValues) {
       setValues((now) => ({ ...now, lengths: { ...now.lengths, [name]: text } })),
     /** Sizes that both kinds have are kept; a condition that the kind cannot be in is not. */
     setKind: (kind: PartKind) => setValues((now) => ({ ...now, kind, condition: keptCondition(kind, now.condition) })),
+    setCondition: (condition: Condition) => {
+      const next = { ...values, condition };
+      setValues(next);
+      if (conditionFacts[condition].hasReadings !== isMeasured) openFor(next);
+    },
     openSize: (name: DimensionName) => setOpen((now) => [...now.filter((one) => one !== name), name]),
     closeSize: (name: DimensionName) => {
       setOpen((now) => now.filter((one) => one !== name));
@@ -39,6 +60,7 @@ export function useStrip(initial: NeedValues) {
     },
   };
 }
+export type Strip = ReturnType<typeof useStrip>;
 
 const keptCondition = (kind: PartKind, condition: Condition): Condition =>
   conditionsFor(kind).includes(condition) ? condition : "sound";

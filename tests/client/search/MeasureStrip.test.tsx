@@ -7,14 +7,18 @@ import { stubApi } from "../support/stubApi";
 
 const renderStrip = (address = "/") =>
   renderAt(address, { "/": null, "/find": null, "/parts/:id": null }, <StripBar />);
+
 const address = () => screen.getByLabelText("address").textContent ?? "";
+const query = () => Object.fromEntries(new URLSearchParams(address().split("?")[1]));
 const diameter = () => screen.getByLabelText("outside diameter");
+const choose = (label: string, option: string) => userEvent.selectOptions(screen.getByLabelText(label), option);
+const hrefOf = (name: string | RegExp) => screen.findByRole("link", { name }).then((link) => link.getAttribute("href"));
+
+beforeEach(() => {
+  stubApi({});
+});
 
 describe("the measure strip", () => {
-  beforeEach(() => {
-    stubApi({});
-  });
-
   it("shows back what it understood of a fraction, and writes the need into the address", async () => {
     renderStrip();
     await userEvent.type(diameter(), "1-47/64");
@@ -71,5 +75,129 @@ describe("the measure strip", () => {
     expect(diameter()).toHaveFocus();
     await userEvent.keyboard("/");
     expect(diameter()).toHaveValue("/");
+  });
+});
+
+describe("several readings of a size", () => {
+  it("are written one after another, and shown back as their mean", async () => {
+    renderStrip();
+    await userEvent.type(diameter(), "44.1");
+    await userEvent.click(screen.getByRole("button", { name: "+ reading of the outside diameter" }));
+    expect(diameter()).toHaveFocus();
+    await userEvent.keyboard("44.0; 44.2");
+    expect(diameter()).toHaveValue("44.1; 44.0; 44.2");
+    expect(diameter()).toHaveAccessibleDescription("3 readings, mean 44.10 mm");
+    await userEvent.keyboard("{Enter}");
+    await waitFor(() => expect(query().outsideDiameter).toBe("44.1; 44.0; 44.2"));
+  });
+
+  it("name the one that cannot be read", async () => {
+    renderStrip();
+    await userEvent.type(diameter(), "44.1; x{Enter}");
+    await waitFor(() => expect(diameter()).toHaveAccessibleDescription(/Reading 2: “x”/));
+    expect(address()).toBe("/");
+  });
+
+  it("say so where they show a flat spot", async () => {
+    renderStrip("/?kind=idler-wheel&outsideDiameter=44.00;+43.70;+44.00");
+    expect(await screen.findByText("Flat spot: the readings differ by 0.30 mm")).toBeInTheDocument();
+    expect(screen.getByText(/As new it was about/)).toHaveTextContent("44.00");
+  });
+});
+
+describe("a part that is gone", () => {
+  const belt = "/?kind=flat-belt&insideCircumference=540&width=5.0+mm&family=lean-deck&shipTo=NO";
+
+  it("leads a belt to its pulleys, with all that is known of it but its length", async () => {
+    renderStrip(belt);
+    await choose("Condition of the old part", "missing");
+    expect(screen.queryByLabelText("inside circumference")).not.toBeInTheDocument();
+    const [path, params] = ((await hrefOf("work it out from the pulleys")) ?? "").split("?");
+    expect(path).toBe("/gauges/belt-route");
+    expect(Object.fromEntries(new URLSearchParams(params))).toEqual({
+      kind: "flat-belt",
+      width: "5.0 mm",
+      family: "lean-deck",
+      shipTo: "NO",
+      unit: "mm",
+    });
+  });
+
+  it("takes its readings back when it turns up again", async () => {
+    renderStrip(belt);
+    await choose("Condition of the old part", "melted");
+    expect(screen.queryByLabelText("width")).not.toBeInTheDocument();
+    await choose("Condition of the old part", "slack");
+    expect(screen.getByLabelText("width")).toHaveValue("5.0 mm");
+    expect(screen.getByLabelText("inside circumference")).toHaveValue("540");
+  });
+
+  it("leads a wheel to the register of its mechanism, and to what else helps", async () => {
+    renderStrip("/?kind=idler-wheel&condition=missing&family=lean-deck");
+    expect(await hrefOf("its mechanism")).toBe("/families/lean-deck");
+    expect(await hrefOf("guides")).toBe("/guides");
+    expect(screen.queryByText("How to measure it")).not.toBeInTheDocument();
+  });
+
+  it("is searched by a size that was worked out, which stands in the sentence and can be changed", async () => {
+    renderStrip("/?kind=flat-belt&insideCircumference=532+%C2%B1+8+mm&condition=missing");
+    const length = screen.getByLabelText("inside circumference");
+    expect(length).toHaveValue("532 ± 8 mm");
+    expect(length.parentElement).toHaveTextContent("worked out as");
+    expect(length).not.toBeInvalid();
+    expect(await screen.findByText(/taken as it stands, without correction/)).toBeInTheDocument();
+    await userEvent.clear(length);
+    await userEvent.type(length, "530 +- 6{Enter}");
+    await waitFor(() =>
+      expect(query()).toEqual({
+        kind: "flat-belt",
+        insideCircumference: "530 +- 6",
+        condition: "missing",
+        shipTo: "DE",
+      }),
+    );
+    expect(screen.getByLabelText("inside circumference")).toHaveAccessibleDescription("530 ± 6 mm");
+  });
+
+  it("takes no reading, says how to write what was worked out, and stays", async () => {
+    renderStrip("/?kind=flat-belt&condition=missing");
+    await choose("Add a size", "width");
+    const width = screen.getByLabelText("width");
+    expect(width).toHaveFocus();
+    await userEvent.type(width, "5.0{Enter}");
+    await waitFor(() => expect(width).toHaveAccessibleDescription(/Write what was worked out, with a ± behind it/));
+    expect(width).toBeInvalid();
+    expect(address()).toBe("/?kind=flat-belt&condition=missing");
+    await userEvent.type(width, " ± 0.3{Enter}");
+    await waitFor(() => expect(query().width).toBe("5.0 ± 0.3"));
+  });
+});
+
+describe("help with measuring", () => {
+  it("shows how the sizes in the sentence are measured, and follows them", async () => {
+    renderStrip();
+    await userEvent.click(screen.getByText("How to measure it"));
+    expect(await screen.findByText("Common mistakes")).toBeInTheDocument();
+    expect(screen.getByText("Outside diameter.")).toBeInTheDocument();
+    expect(screen.queryByText("Bore.")).not.toBeInTheDocument();
+    await choose("Add a size", "bore");
+    expect(screen.getByText("Bore.")).toBeInTheDocument();
+    await choose("Kind of part", "flat belt");
+    expect(screen.getByText("Inside circumference.")).toBeInTheDocument();
+  });
+
+  it("offers other ways to measure a belt, and takes along what was read", async () => {
+    renderStrip("/?kind=square-belt&insideCircumference=540;+541&section=2.0&condition=slack&instrument=steel-rule");
+    const [path, params] = ((await hrefOf("Laid flat, or on a cone")) ?? "").split("?");
+    expect(path).toBe("/gauges/belt-sample");
+    expect(Object.fromEntries(new URLSearchParams(params))).toEqual({
+      kind: "square-belt",
+      insideCircumference: "540; 541",
+      section: "2.0",
+      instrument: "steel-rule",
+      condition: "slack",
+      shipTo: "DE",
+      unit: "mm",
+    });
   });
 });
