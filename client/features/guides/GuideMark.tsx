@@ -1,6 +1,6 @@
 import { kindFacts } from "#shared/domain/partKinds";
 import { MeasuringDrawing } from "../../ui/measuring/MeasuringDrawing";
-import type { Guide } from "./guides";
+import type { GuideEntry } from "./measuringGuides";
 
 const line = { fill: "none", stroke: "var(--color-ink)", strokeWidth: 1.6 } as const;
 const blue = { fill: "none", stroke: "var(--color-measured)", strokeWidth: 2.2 } as const;
@@ -72,7 +72,7 @@ const marks: Record<string, React.ReactNode> = {
 };
 
 /** What a guide is about: for a kind, its first size being taken. */
-export function GuideMark({ guide: { slug, kinds } }: { guide: Guide }) {
+export function GuideMark({ guide: { slug, kinds } }: { guide: GuideEntry }) {
   const [kind] = kinds;
   if (kind) return <MeasuringDrawing kind={kind} dimension={kindFacts[kind].primary} className="h-auto w-full" />;
   return (

@@ -4,13 +4,13 @@ import { cautions } from "../../ui/measuring/cautions";
 import { MeasuringSteps } from "../../ui/measuring/MeasuringSteps";
 import { measuringWords } from "../../ui/measuring/measuringWords";
 import { GuideSection } from "./GuideSection";
-import type { Guide } from "./guides";
 import { HowFine } from "./HowFine";
+import type { GuideEntry } from "./measuringGuides";
 import { Points } from "./Points";
 import { WhereNext } from "./WhereNext";
 
 /** How to measure the parts of one kind, or of a few that are measured alike. */
-export function KindGuide({ guide: { kinds } }: { guide: Guide }) {
+export function KindGuide({ guide: { kinds } }: { guide: GuideEntry }) {
   const several = kinds.length > 1;
   const mistakes = new Set(kinds.flatMap((kind) => measuringWords[kind].mistakes));
   const minded = new Set(kinds.flatMap((kind) => measuringWords[kind].cautions));

@@ -3,7 +3,7 @@ import type { KitLine } from "#shared/drawing/KitLine";
 import { KitDrawing } from "../../ui/drawing/KitDrawing";
 import { exampleSizes } from "./exampleSizes";
 import { GuideSection } from "./GuideSection";
-import { guides } from "./guides";
+import { measuringGuides } from "./measuringGuides";
 import { Points } from "./Points";
 
 const example = (
@@ -48,15 +48,13 @@ export function KitGuide() {
       </GuideSection>
       <GuideSection title="Measure each part">
         <ul className="grid gap-x-10 sm:grid-cols-2">
-          {guides
-            .filter(({ kinds }) => kinds.length > 0)
-            .map(({ slug, title }) => (
-              <li key={slug}>
-                <Link to={`/guides/${slug}`} className="inline-flex min-h-8 items-center">
-                  {title}
-                </Link>
-              </li>
-            ))}
+          {measuringGuides.map(({ slug, title }) => (
+            <li key={slug}>
+              <Link to={`/guides/${slug}`} className="inline-flex min-h-8 items-center">
+                {title}
+              </Link>
+            </li>
+          ))}
         </ul>
       </GuideSection>
     </>

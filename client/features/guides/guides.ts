@@ -1,15 +1,9 @@
 import { type ComponentType, lazy } from "react";
-import type { PartKind } from "#shared/domain/partKinds";
+import { type GuideEntry, measuringGuides } from "./measuringGuides";
 
-export type Guide = {
-  slug: string;
-  title: string;
-  /** What it tells, in one sentence. */
-  summary: string;
+export type Guide = GuideEntry & {
   group: "measuring" | "working";
-  /** The kinds that it tells how to measure. */
-  kinds: readonly PartKind[];
-  Body: ComponentType<{ guide: Guide }>;
+  Body: ComponentType<{ guide: GuideEntry }>;
 };
 
 // Each guide's body is fetched when it is first opened.
@@ -21,73 +15,42 @@ const Instruments = lazy(async () => ({ default: (await import("./InstrumentsGui
 const Limits = lazy(async () => ({ default: (await import("./LimitsGuide")).LimitsGuide }));
 const Cautions = lazy(async () => ({ default: (await import("./CautionsGuide")).CautionsGuide }));
 
-const measuring = (slug: string, title: string, summary: string, kinds: readonly PartKind[]): Guide => ({
+const guide = (group: Guide["group"], slug: string, title: string, summary: string, Body: Guide["Body"]): Guide => ({
   slug,
   title,
   summary,
-  group: "measuring",
-  kinds,
-  Body: Kind,
-});
-const working = (slug: string, title: string, summary: string, Body: Guide["Body"]): Guide => ({
-  slug,
-  title,
-  summary,
-  group: "working",
   kinds: [],
+  group,
   Body,
 });
 
 /** Every guide, in the order in which they are read. */
 export const guides: readonly Guide[] = [
-  measuring("idler-wheel", "Measuring an idler wheel", "Three diameters round the rubber, the bore, the widths.", [
-    "idler-wheel",
-  ]),
-  measuring(
-    "pinch-roller",
-    "Measuring a pinch roller",
-    "Its diameter beside the groove of the tape, the bore, the lengths.",
-    ["pinch-roller"],
-  ),
-  measuring("belts", "Measuring a belt", "Flat, square or round: the inside of the loop, then its section.", [
-    "flat-belt",
-    "square-belt",
-    "round-belt",
-  ]),
-  measuring("drive-ring", "Measuring a drive ring", "The free ring, off its hub: inside diameter and section.", [
-    "drive-ring",
-  ]),
-  measuring("motor-mount", "Measuring a motor mount", "A grommet without its load: flange, hole, groove, height.", [
-    "motor-mount",
-  ]),
-  measuring("pads-and-felts", "Measuring brake pads and felts", "Soft things that the jaws must only touch.", [
-    "brake-pad",
-    "clutch-felt",
-  ]),
-  {
-    ...working("rebuild-kit", "What to do with a kit", "A kit is as good as its lines: measure each part.", Kit),
-    group: "measuring",
-  },
-  working(
+  ...measuringGuides.map((entry): Guide => ({ ...entry, group: "measuring", Body: Kind })),
+  guide("measuring", "rebuild-kit", "What to do with a kit", "A kit is as good as its lines: measure each part.", Kit),
+  guide(
+    "working",
     "conditions",
     "What age does to a size",
     "What each condition takes or adds, and how surely that is known.",
     Conditions,
   ),
-  working(
+  guide(
+    "working",
     "fit-chance",
     "How the fit chance is worked out",
     "A bell curve over what the place accepts, with every step.",
     FitChance,
   ),
-  working(
+  guide(
+    "working",
     "instruments",
     "What the instruments are worth",
     "How far each may be off, from a micrometer to a string.",
     Instruments,
   ),
-  working("limits", "What cannot be known", "Where the numbers end, and what to do there.", Limits),
-  working("cautions", "Cautions at the bench", "Mains, spinning parts, tar, vapour and dust.", Cautions),
+  guide("working", "limits", "What cannot be known", "Where the numbers end, and what to do there.", Limits),
+  guide("working", "cautions", "Cautions at the bench", "Mains, spinning parts, tar, vapour and dust.", Cautions),
 ];
 
 export const groupTitles = { measuring: "Measuring the old part", working: "From the reading to the part" } as const;
