@@ -77,7 +77,7 @@ export function BeltFields({ state, errors, onChange }: Props) {
         </SelectField>
         <SelectField
           name="condition"
-          label="It is"
+          label="Condition"
           hint={conditionFacts[condition].sign}
           value={condition}
           onChange={(event) => onChange({ condition: event.target.value as Condition })}

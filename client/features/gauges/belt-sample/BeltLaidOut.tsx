@@ -56,7 +56,7 @@ export function BeltLaidOut({ sample, unit }: Props) {
           strokeWidth={0.9}
         />
         <path
-          d={loop(at(foundMm), foundY, 0) + loop(at(foundMm), foundY, thick)}
+          d={loop(at(foundMm), foundY, 0) + (thick < 4 ? "" : loop(at(foundMm), foundY, thick))}
           fill="none"
           stroke="var(--color-measured)"
           strokeWidth={1.6}

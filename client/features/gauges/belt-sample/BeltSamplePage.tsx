@@ -63,7 +63,7 @@ export function BeltSamplePage() {
             <BudgetTable budget={good.sample.result.budget} unit={unit} />
             <section className="grid gap-3">
               <RuledHeading>How it is reckoned</RuledHeading>
-              <ol className="grid max-w-prose list-decimal gap-1 pl-6">
+              <ol className="grid max-w-prose list-decimal gap-1 pl-8">
                 {good.sample.result.basis.map((line) => (
                   <li key={line}>{line}</li>
                 ))}

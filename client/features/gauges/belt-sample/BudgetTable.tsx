@@ -32,7 +32,7 @@ export function BudgetTable({ budget, unit }: { budget: readonly Contribution[];
             <th scope="col" className="pr-4 pb-1 font-semibold">
               From
             </th>
-            <th scope="col" className="pr-4 pb-1 text-right font-semibold">
+            <th scope="col" className="pr-4 pb-1 text-right font-semibold whitespace-nowrap">
               u, {unit}
             </th>
             <th scope="col" className="w-2/5 pb-1 font-semibold">
@@ -45,7 +45,7 @@ export function BudgetTable({ budget, unit }: { budget: readonly Contribution[];
             <tr key={term.name} className="border-t border-rule align-top">
               <th scope="row" className="py-2 pr-4 font-semibold">
                 {names[term.name]}
-                <span className="block text-small font-normal text-soft">
+                <span className="hidden text-small font-normal text-soft sm:block">
                   {term.words} ({term.source}).
                 </span>
               </th>
@@ -64,22 +64,23 @@ export function BudgetTable({ budget, unit }: { budget: readonly Contribution[];
 /** A bar as long as its share of the full line, outlined; the figure stands beside it. */
 function ShareBar({ share, isHatched }: { share: number; isHatched: boolean }) {
   const percent = share * 100;
-  const width = `${Math.max(percent, 0.5)}%`;
+  // The outline keeps the smallest share visible and the largest inside.
+  const width = `${Math.max(percent, 0.5) * 0.995}%`;
   return (
     <span className="grid grid-cols-[minmax(0,1fr)_3.5rem] items-center gap-2">
-      <svg width="100%" height="16" aria-hidden="true" className="block overflow-visible">
+      <svg width="100%" height="16" aria-hidden="true" className="block">
         <defs>
           <pattern id="budget-hatch" width="6" height="6" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
             <rect width="6" height="6" fill="var(--color-sheet)" />
             <path d="M0 0V6" stroke="var(--color-measured)" strokeWidth="2" />
           </pattern>
         </defs>
-        <path d="M0 15.5H9999" stroke="var(--color-rule)" clipPath="inset(0)" />
+        <rect y="15" width="100%" height="1" fill="var(--color-edge)" />
         <rect
           x="0.5"
           y="2.5"
           width={width}
-          height="11"
+          height="12"
           fill={isHatched ? "url(#budget-hatch)" : "var(--color-measured-fill)"}
           stroke="var(--color-measured)"
         />

@@ -32,7 +32,7 @@ export function ReadingFields({ state, sample, errors, onReadings }: Props) {
     );
   return (
     <section className="grid gap-4">
-      <RuledHeading>Readings</RuledHeading>
+      <RuledHeading>{reading}</RuledHeading>
       <p className="max-w-prose text-soft">
         {hint} Read it again at another place: several readings say more than one.
       </p>
@@ -41,7 +41,7 @@ export function ReadingFields({ state, sample, errors, onReadings }: Props) {
           <div key={name} className="grid grid-cols-[minmax(0,1fr)_auto] items-start gap-x-2">
             <LengthField
               name={name}
-              label={readings.length === 1 ? reading : `${reading} ${i + 1}`}
+              label={readings.length === 1 ? "Reading" : `Reading ${i + 1}`}
               text={text}
               unit={unit}
               error={errors[name]}
