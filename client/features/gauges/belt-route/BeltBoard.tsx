@@ -1,0 +1,127 @@
+import { type KeyboardEvent, useCallback, useRef } from "react";
+import type { BeltRoute } from "#shared/domain/beltRoute";
+import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
+import { Button } from "../../../ui/Button";
+import { useOwnWidth } from "../../../ui/drawing/useOwnWidth";
+import { BoardDrawing } from "./BoardDrawing";
+import { type NamedPulley, pulleyName } from "./beltState";
+import { toPx } from "./boardView";
+import { keyStep } from "./keyStep";
+import { PulleyHandle } from "./PulleyHandle";
+import { RefusalNote } from "./RefusalNote";
+import { RimHandle } from "./RimHandle";
+import type { Refusal } from "./solveState";
+import { useBoardView } from "./useBoardView";
+import { usePulleyDrag } from "./usePulleyDrag";
+
+type Props = {
+  pulleys: readonly NamedPulley[];
+  /** The route, or the last one that closed. */
+  route: BeltRoute | null;
+  isStale: boolean;
+  refusal: Refusal | null;
+  thickness: number;
+  unit: SizeUnit;
+  /** Another one is another machine, which is shown whole. */
+  drawn: string;
+  selectedId: number | null;
+  onSelect: (id: number) => void;
+  onChange: (id: number, change: Partial<NamedPulley>, isByKey: boolean) => void;
+};
+
+const arrows: Record<string, readonly [number, number]> = {
+  ArrowLeft: [-1, 0],
+  ArrowRight: [1, 0],
+  ArrowUp: [0, 1],
+  ArrowDown: [0, -1],
+};
+
+/** The drawing with what its pulleys are dragged by; each is reached by Tab and moved with the arrow keys. */
+export function BeltBoard(props: Props) {
+  const { pulleys, route, isStale, refusal, thickness, unit, drawn, selectedId, onSelect, onChange } = props;
+  const [place, width] = useOwnWidth(760);
+  const board = { width, height: Math.round(Math.min(Math.max(width * 0.66, 320), 560)) };
+  const latest = useRef(props);
+  latest.current = props;
+  const scale = useRef(1);
+  const onDrag = useCallback(
+    (id: number, change: Partial<NamedPulley>) => latest.current.onChange(id, change, false),
+    [],
+  );
+  const { isHeld, hold, holdRim, handlers } = usePulleyDrag(pulleys, scale, onDrag);
+  const { view, closer, wider, fit } = useBoardView(pulleys, thickness, board, drawn, isHeld);
+  scale.current = view.scale;
+
+  const onKey = useCallback((event: KeyboardEvent, id: number) => {
+    const way = arrows[event.key];
+    const pulley = latest.current.pulleys.find((one) => one.id === id);
+    if (!way || !pulley) return;
+    event.preventDefault();
+    const step = keyStep(event);
+    latest.current.onChange(id, { x: pulley.x + way[0] * step, y: pulley.y + way[1] * step }, true);
+  }, []);
+
+  const sizeOf = (mm: number) => `${roundedSize(mm, unit)} ${unit}`;
+  const selected = pulleys.findIndex(({ id }) => id === selectedId);
+  const chosen = pulleys[selected];
+
+  return (
+    <div>
+      <div
+        ref={place}
+        role="application"
+        aria-label="Board. Arrow keys move a pulley by 1 mm, with Shift by 10 mm, with Alt by 0.1 mm."
+        className="gauge-sheet relative mt-2 overflow-hidden"
+        {...handlers}
+      >
+        <BoardDrawing
+          pulleys={pulleys}
+          route={route}
+          isStale={isStale}
+          refusedIndex={refusal?.pulley ?? null}
+          thickness={thickness}
+          unit={unit}
+          view={view}
+          board={board}
+        />
+        {pulleys.map((pulley, i) => (
+          <PulleyHandle
+            key={pulley.id}
+            id={pulley.id}
+            words={`${pulleyName(pulley, i)}: x ${sizeOf(pulley.x)}, y ${sizeOf(pulley.y)}, ${sizeOf(pulley.diameter)} across`}
+            {...toPx(view, pulley)}
+            radius={(pulley.diameter / 2) * view.scale}
+            isSelected={pulley.id === selectedId}
+            onHold={hold}
+            onKey={onKey}
+            onSelect={onSelect}
+          />
+        ))}
+        {chosen && (
+          <RimHandle
+            id={chosen.id}
+            name={pulleyName(chosen, selected)}
+            diameter={chosen.diameter}
+            {...toPx(view, chosen)}
+            radius={(chosen.diameter / 2) * view.scale}
+            onHold={holdRim}
+            onDiameter={(id, diameter) => onChange(id, { diameter }, true)}
+          />
+        )}
+        {refusal && <RefusalNote refusal={refusal} pulleys={pulleys} view={view} board={board} />}
+      </div>
+      <div className="flex flex-wrap items-center gap-x-4 print:hidden">
+        <span className="text-soft">Look</span>
+        <Button look="quiet" onClick={closer}>
+          closer
+        </Button>
+        <Button look="quiet" onClick={wider}>
+          wider
+        </Button>
+        <Button look="quiet" onClick={fit}>
+          everything
+        </Button>
+      </div>
+    </div>
+  );
+}
