@@ -12,14 +12,20 @@ import { ReadingFields } from "./ReadingFields";
 import { readSample } from "./readSample";
 import { SampleReadouts } from "./SampleReadouts";
 
+const exampleState = beltSampleCodec.read(new URLSearchParams());
+const workedExample = { state: exampleState, sample: readSample(exampleState).sample! };
+
 /** The size of a belt from the old one, however it was measured: as found, as new, and how sure that is. */
 export function BeltSamplePage() {
   const [state, setState] = useGaugeState<BeltSampleState>(beltSampleCodec);
   const { sample, errors } = readSample(state);
   const { good, isStale } = useLastGood(sample && { sample, state });
+  // An address may be wrong from the start: then the worked example stands behind, greyed.
+  const shown = good ?? workedExample;
   const change = useCallback((part: Partial<BeltSampleState>) => setState((now) => ({ ...now, ...part })), [setState]);
   const { unit } = state;
-  const stale = isStale ? "opacity-40" : "";
+  // What is out of date is drained of its colour; words stay dark enough to be read.
+  const stale = isStale ? "text-soft grayscale" : "";
 
   return (
     <GaugePage
@@ -28,26 +34,20 @@ export function BeltSamplePage() {
       board={
         <>
           <MethodChooser method={state.method} onMethod={(method) => change({ method })} />
-          {good && (
-            <div className={stale}>
-              <BeltLaidOut sample={good.sample} unit={unit} />
-            </div>
-          )}
+          <div className={isStale ? "opacity-40 grayscale" : ""}>
+            <BeltLaidOut sample={shown.sample} unit={unit} />
+          </div>
           {isStale && (
             <p role="status" className="pt-2 font-semibold text-outband">
-              {good
-                ? "The picture and the figures are not of these readings: mend the fields that say so below."
-                : "Nothing can be drawn yet: mend the fields that say so below."}
+              The picture and the figures are not of these readings: mend the fields that say so below.
             </p>
           )}
         </>
       }
       side={
-        good && (
-          <div className={`grid gap-7 ${stale}`}>
-            <SampleReadouts state={good.state} sample={good.sample} unit={unit} />
-          </div>
-        )
+        <div className={`grid gap-7 ${stale}`}>
+          <SampleReadouts state={shown.state} sample={shown.sample} unit={unit} isStale={isStale} />
+        </div>
       }
     >
       <div className="grid gap-8">
@@ -58,23 +58,21 @@ export function BeltSamplePage() {
           onReadings={(readings) => change({ readings: readings.length > 0 ? readings : [""] })}
         />
         <BeltFields state={state} errors={errors} onChange={change} />
-        {good && (
-          <div className={`grid gap-8 ${stale}`}>
-            <BudgetTable budget={good.sample.result.budget} unit={unit} />
-            <section className="grid gap-3">
-              <RuledHeading>How it is reckoned</RuledHeading>
-              <ol className="grid max-w-prose list-decimal gap-1 pl-8">
-                {good.sample.result.basis.map((line) => (
-                  <li key={line}>{line}</li>
-                ))}
-              </ol>
-              <p className="max-w-prose text-soft">
-                Before a belt is put on: machine unplugged. What is left of a tarred belt stains and should not be
-                breathed in as dust; wipe it off with gloves on. Check the new belt on the machine before closing it up.
-              </p>
-            </section>
-          </div>
-        )}
+        <div className={`grid gap-8 ${stale}`}>
+          <BudgetTable budget={shown.sample.result.budget} unit={unit} />
+          <section className="grid gap-3">
+            <RuledHeading>How it is reckoned</RuledHeading>
+            <ol className="grid max-w-prose list-decimal gap-1 pl-8">
+              {shown.sample.result.basis.map((line) => (
+                <li key={line}>{line}</li>
+              ))}
+            </ol>
+            <p className="max-w-prose text-soft">
+              Before a belt is put on: machine unplugged. What is left of a tarred belt stains and should not be
+              breathed in as dust; wipe it off with gloves on. Check the new belt on the machine before closing it up.
+            </p>
+          </section>
+        </div>
       </div>
     </GaugePage>
   );

@@ -22,8 +22,8 @@ export function BudgetTable({ budget, unit }: { budget: readonly Contribution[];
     <section className="grid gap-3">
       <RuledHeading>What makes it uncertain</RuledHeading>
       <p className="max-w-prose text-soft">
-        Shares of the variance, which add up to the whole; the standard uncertainties in {unit} add up as squares.
-        Hatched is what the condition adds to the measuring.
+        Shares of the variance, which add up to the whole; the standard uncertainties u add up as squares. Hatched is
+        what the condition adds to the measuring.
       </p>
       <table className="w-full border-collapse text-left tabular-nums">
         <caption className="sr-only">Budget of the uncertainty of the inside circumference as new</caption>

@@ -5,8 +5,16 @@ import type { BeltSampleState } from "./beltSampleState";
 import { findBelt } from "./findBelt";
 import type { Sample } from "./readSample";
 
+type Props = {
+  state: BeltSampleState;
+  sample: Sample;
+  unit: SizeUnit;
+  /** The figures are not of what stands in the fields: no search for them. */
+  isStale: boolean;
+};
+
 /** The belt as found and as new, and the search for it. */
-export function SampleReadouts({ state, sample, unit }: { state: BeltSampleState; sample: Sample; unit: SizeUnit }) {
+export function SampleReadouts({ state, sample, unit, isStale }: Props) {
   const { asFound, asNew } = sample.result;
   const other = unit === "mm" ? "in" : "mm";
   const show = (mm: number) => `${roundedSize(mm, unit)} ${unit}`;
@@ -29,12 +37,14 @@ export function SampleReadouts({ state, sample, unit }: { state: BeltSampleState
           {show(asNew.insideCircumferenceMm / Math.PI)} across.
         </p>
       </Readout>
-      <div className="grid gap-2 print:hidden">
-        <LinkButton look="primary" to={search.to}>
-          Find this belt
-        </LinkButton>
-        <p className="text-small text-soft">{search.words}</p>
-      </div>
+      {!isStale && (
+        <div className="grid gap-2 print:hidden">
+          <LinkButton look="primary" to={search.to}>
+            Find this belt
+          </LinkButton>
+          <p className="text-small text-soft">{search.words}</p>
+        </div>
+      )}
     </>
   );
 }

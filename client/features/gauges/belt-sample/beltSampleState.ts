@@ -29,7 +29,7 @@ export type BeltSampleState = {
   shipTo: string;
 };
 
-export const example: Omit<BeltSampleState, "unit" | "family" | "shipTo"> = {
+const example: Omit<BeltSampleState, "unit" | "family" | "shipTo"> = {
   method: "lay-flat-inside",
   kind: "flat-belt",
   readings: ["261.5 mm", "262 mm", "261.5 mm"],

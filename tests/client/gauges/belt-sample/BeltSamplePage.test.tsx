@@ -90,7 +90,8 @@ describe("the belt sample gauge", () => {
     open("?method=outside-circumference&readings=430+mm");
     const thickness = screen.getByRole("textbox", { name: "Thickness" });
     expect(thickness).toHaveAccessibleDescription(/needs the belt's thickness/);
-    expect(screen.getByText(/Nothing can be drawn yet/)).toBeInTheDocument();
+    expect(screen.getByRole("status")).toHaveTextContent("not of these readings");
+    expect(screen.queryByRole("link", { name: "Find this belt" })).not.toBeInTheDocument();
     await user.type(thickness, "49");
     expect(readout("As found")).toHaveTextContent("122.12");
     await user.clear(thickness);
