@@ -19,7 +19,7 @@ const limit = (
   use: SpeedLimit["use"] = "playing",
 ): SpeedLimit => ({ name, medium, use, lowerPercent, upperPercent, source, status });
 
-const forum = "attributed to DIN in a forum, mean over 30 s";
+const forum = "Attributed to DIN in a forum, mean over 30 s";
 
 /**
  * Published limits of the mean speed, in percent of the rated speed, ends included. No others were found: the playback

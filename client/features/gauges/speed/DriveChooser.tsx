@@ -16,7 +16,7 @@ export function DriveChooser({ drive, onDrive }: { drive: Drive; onDrive: (drive
         {choices.map((choice) => (
           <label
             key={choice.drive}
-            className="grid cursor-pointer justify-items-start border border-edge bg-sheet px-3 py-2 has-checked:border-measured has-checked:outline-1 has-checked:outline-measured has-focus-visible:outline-2 has-focus-visible:outline-focus"
+            className="grid cursor-pointer content-start justify-items-start border border-edge bg-sheet px-3 py-2 has-checked:border-measured has-checked:outline-1 has-checked:outline-measured has-focus-visible:outline-2 has-focus-visible:outline-focus"
           >
             <input
               type="radio"

@@ -13,13 +13,16 @@ export function ErrorScale({ error, medium }: Props) {
   const [place, width] = useOwnWidth(320);
   const limits = limitsOf(medium);
   const range = rangeFor(error.errorPercent, limits);
-  const xOf = (percent: number) => width / 2 + (percent / range) * (width / 2 - 12);
+  const xOf = (percent: number) => width / 2 + (percent / range) * (width / 2 - 22);
   const x = Math.min(Math.max(xOf(error.errorPercent), 5), width - 5);
   return (
     <section className="grid gap-3">
       <RuledHeading>Error and published limits</RuledHeading>
       <div ref={place} className="grid gap-3">
-        <Ruler error={error} range={range} width={width} xOf={xOf} x={x} />
+        <div>
+          <Ruler error={error} range={range} width={width} xOf={xOf} x={x} />
+          <p className="text-small text-soft">Percent above, cents (hundredths of a semitone) below.</p>
+        </div>
         <ul className="grid gap-3">
           {limits.map((limit) => (
             <LimitRow key={limit.name} limit={limit} error={error} width={width} xOf={xOf} x={x} />
@@ -42,17 +45,19 @@ function Ruler({ error, range, width, xOf, x }: Placed & { range: number }) {
   return (
     <svg width={width} height={84} viewBox={`0 0 ${width} 84`} role="img" aria-label={words} className="block">
       <path d={`M0 ${percentY}H${width}M0 ${centsY}H${width}`} stroke="var(--color-ink)" />
-      {axisMarks({ fromMm: -range, toMm: range }, width - 24, "mm", 48).map(({ mm, label }) => (
-        <g key={mm}>
-          <path d={`M${xOf(mm)} ${percentY}v${label ? -9 : -5}`} stroke="var(--color-ink)" />
-          {label && (
-            <text x={xOf(mm)} y={percentY - 13} {...figures}>
-              {signed(mm, label.split(".")[1]?.length ?? 0)}
-            </text>
-          )}
-        </g>
-      ))}
-      {centMarks(range, width / 52).map(({ cents, percent }) => (
+      {axisMarks({ fromMm: -range, toMm: range }, width - 44, "mm", 48)
+        .filter(({ mm }) => mm >= -100)
+        .map(({ mm, label }) => (
+          <g key={mm}>
+            <path d={`M${xOf(mm)} ${percentY}v${label ? -9 : -5}`} stroke="var(--color-ink)" />
+            {label && (
+              <text x={xOf(mm)} y={percentY - 13} {...figures}>
+                {signed(mm, label.split(".")[1]?.length ?? 0)}
+              </text>
+            )}
+          </g>
+        ))}
+      {centMarks(range, width).map(({ cents, percent }) => (
         <g key={cents}>
           <path d={`M${xOf(percent)} ${centsY}v9`} stroke="var(--color-ink)" />
           <text x={xOf(percent)} y={centsY + 22} {...figures}>
@@ -61,9 +66,6 @@ function Ruler({ error, range, width, xOf, x }: Placed & { range: number }) {
         </g>
       ))}
       <rect x={0} y={percentY + 1} width={width} height={centsY - percentY - 2} fill="var(--color-sheet)" />
-      <text x={2} y={percentY + 15} fontSize={12} fill="var(--color-soft)">
-        percent above, cents below
-      </text>
       <path d={`M${xOf(0)} ${percentY - 9}V${centsY + 9}`} stroke="var(--color-ink)" strokeWidth={1.5} />
       <path d={`M${x} ${percentY + 1}V${84}`} stroke="var(--color-measured)" strokeWidth={2.5} />
       <path d={`M${x} ${percentY + 1}l-5.5 9h11Z`} fill="var(--color-measured)" />

@@ -1,12 +1,18 @@
 import type { SpeedInput } from "#shared/domain/driveTrain";
-import { nominalSpeeds } from "#shared/domain/nominalSpeeds";
 import { roundDecimal } from "#shared/domain/roundDecimal";
 import type { SpeedResult } from "#shared/domain/speed";
+import { speedBounds } from "#shared/domain/speedBounds";
 import type { SizeUnit } from "../../../lib/formatSize";
 import { Readout } from "../Readout";
 import { sizeName } from "./sizeNames";
 
 type Props = { input: SpeedInput; result: SpeedResult; unit: SizeUnit };
+
+/** Whether a size can be measured and made at all. */
+export const isToBeHad = (mm: number | undefined): mm is number => {
+  const [least, most] = speedBounds.diameterMm;
+  return mm !== undefined && mm >= least && mm <= most;
+};
 
 /** A size to turn on a lathe: to the micrometre, or the ten-thousandth of an inch. */
 export const turnedSize = (mm: number, unit: SizeUnit): string =>
@@ -21,19 +27,18 @@ export function FirstSize({ input, result, unit }: Props) {
   const isTape = input.drive === "capstan";
   const wanted = isTape ? `${result.target} in/s` : `${result.target} rpm`;
   const need = first.neededMm;
-  if (need === undefined) {
+  if (!isToBeHad(need)) {
     return (
       <Readout label={`For just ${wanted}`} value={null}>
-        <p>No {name} is small enough with so thick a belt.</p>
+        <p>No {name} that can be made gives this speed: change another size.</p>
       </Readout>
     );
   }
-  const speed = nominalSpeeds[result.target];
   return (
     <Readout label={`For just ${wanted}`} value={`ø ${turnedSize(need, unit)}`} unit={unit} look="measured">
       <p>
-        {sizeName(first.field, stages)} to turn for {isTape ? `${speed} mm/s` : wanted} from this motor; it has ø{" "}
-        {turnedSize(first.mm, unit)} now. Or change one other size: see the table.
+        {sizeName(first.field, stages)} to turn for this motor; it has ø {turnedSize(first.mm, unit)} now. Or change one
+        other size: see the table.
       </p>
     </Readout>
   );

@@ -2,7 +2,6 @@ import { signPath } from "#shared/drawing/signMark";
 import { signWidthEm, textWidth } from "#shared/drawing/textWidth";
 import { type LabelLine, labelSize, lineHeight, lineWidth, type TrainLabel } from "./trainLabels";
 
-const halo = { paintOrder: "stroke", stroke: "var(--color-sheet)", strokeWidth: 4, strokeLinejoin: "round" } as const;
 type Anchor = "start" | "middle";
 
 /** One line of a label. The diameter sign before its number is drawn, since few fonts have it. */
@@ -10,7 +9,7 @@ function Line({ line, x, y, colour }: { line: LabelLine; x: number; y: number; c
   const { name, number, look } = line;
   const size = labelSize[look];
   const weight = look === "soft" ? 500 : 600;
-  const words = { y, fontSize: size, fontWeight: weight, fill: colour, ...halo };
+  const words = { y, fontSize: size, fontWeight: weight, fill: colour };
   const afterName = x + textWidth(name, size, weight);
   const struck = look === "struck" ? `M${x - 2} ${y - size * 0.3}H${x + lineWidth(line) + 2}` : undefined;
   return (

@@ -7,18 +7,18 @@ import type { SizeUnit } from "../../../lib/formatSize";
 import { cautions } from "../../../ui/measuring/cautions";
 import { Readout } from "../Readout";
 import { errorSentence } from "./errorWords";
-import { turnedSize } from "./FirstSize";
+import { isToBeHad, turnedSize } from "./FirstSize";
 import { sizeName } from "./sizeNames";
 import { rpmText } from "./trainLabels";
 
 type Props = { input: SpeedInput; result: SpeedResult; unit: SizeUnit };
 
-/** The step that hits the target at the other mains; null where there is no target or no such step. */
-function neededThere(input: SpeedInput, mainsHz: number): number | null {
+/** The step that hits the target at the other mains; undefined where there is no target or no such step. */
+function neededThere(input: SpeedInput, mainsHz: number): number | undefined {
   try {
-    return solveSpeed({ ...input, mainsHz }).sizes[0]?.neededMm ?? null;
+    return solveSpeed({ ...input, mainsHz }).sizes[0]?.neededMm;
   } catch (error) {
-    if (error instanceof DomainError) return null;
+    if (error instanceof DomainError) return undefined;
     throw error;
   }
 }
@@ -42,7 +42,7 @@ export function OtherMains({ input, result, unit }: Props) {
     >
       <p>
         {name} that keeps today’s speed there
-        {needed !== null && `; ø ${turnedSize(needed, unit)} would hit the target there`}.
+        {isToBeHad(needed) && `; ø ${turnedSize(needed, unit)} would hit the target there`}.
       </p>
       <p>
         Left as it is, it would run at {rpmText(there)} {isTape ? "mm/s" : "rpm"}.{" "}

@@ -3,7 +3,7 @@ import type { SpeedResult } from "#shared/domain/speed";
 import { type SizeUnit, sizeNumber } from "../../../lib/formatSize";
 import { RuledHeading } from "../../../ui/RuledHeading";
 import { signed } from "./errorWords";
-import { turnedSize } from "./FirstSize";
+import { isToBeHad, turnedSize } from "./FirstSize";
 import { isThickness, sizeName } from "./sizeNames";
 
 type Props = { input: SpeedInput; result: SpeedResult; unit: SizeUnit };
@@ -35,9 +35,7 @@ export function SettingTable({ input, result, unit }: Props) {
                 </td>
                 <td className="py-1.5 pr-3 text-right">{signed(percentPerHundredthMm * step, 3)} %</td>
                 {result.target && (
-                  <td className="py-1.5 text-right">
-                    {neededMm === undefined ? "–" : `ø ${turnedSize(neededMm, unit)}`}
-                  </td>
+                  <td className="py-1.5 text-right">{isToBeHad(neededMm) ? `ø ${turnedSize(neededMm, unit)}` : "–"}</td>
                 )}
               </tr>
             ))}

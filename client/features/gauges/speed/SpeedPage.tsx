@@ -31,9 +31,14 @@ export function SpeedPage() {
       board={
         <>
           <DriveChooser drive={drive} onDrive={(next) => setState((now) => withDrive(now, next))} />
-          <div className={isStale ? "opacity-40" : ""}>
+          <div inert={isStale} className={isStale ? "opacity-40" : ""}>
             <TrainDrawing input={shown.input} result={shown.result} unit={unit} />
           </div>
+          <p className="pt-2 text-small text-soft">
+            To scale, but for the distances between shafts. Blue sizes set the speed
+            {drive === "rim" ? "; the pale one cancels." : "."}
+            {isTape && " Dashed: the pinch roller, which only presses."}
+          </p>
           {isStale && (
             <p role="status" className="pt-2 font-semibold text-outband">
               The picture and the figures are not of these sizes: mend the fields that say so below.
@@ -42,7 +47,7 @@ export function SpeedPage() {
         </>
       }
       side={
-        <div className={`grid gap-7 ${isStale ? "opacity-40" : ""}`}>
+        <div inert={isStale} className={`grid gap-7 ${isStale ? "opacity-40" : ""}`}>
           <SpeedResults input={shown.input} result={shown.result} unit={unit} />
         </div>
       }
@@ -50,7 +55,7 @@ export function SpeedPage() {
       <div className="grid gap-8">
         <section className="grid gap-4">
           <RuledHeading>Motor and speed wanted</RuledHeading>
-          <div className="grid gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
+          <div className="grid items-start gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
             <MotorFields
               motor={motor}
               errors={errors}
@@ -77,7 +82,7 @@ export function SpeedPage() {
           {isTape && (
             <StageFields stages={stages} unit={unit} errors={errors} onStages={(next) => change({ stages: next })} />
           )}
-          <div className="grid gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
+          <div className="grid items-start gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
             <DriveFields
               state={state}
               errors={errors}
@@ -98,7 +103,7 @@ export function SpeedPage() {
             </SelectField>
           </div>
         </section>
-        <div className={isStale ? "opacity-40" : ""}>
+        <div inert={isStale} className={isStale ? "opacity-40" : ""}>
           <SettingTable input={shown.input} result={shown.result} unit={unit} />
         </div>
       </div>

@@ -30,7 +30,7 @@ export function SpeedResults({ input, result, unit }: Props) {
             {roundDecimal(tapeSpeedMmPerS / 25.4, 4)} in/s; the capstan turns at {rpmText(outputRpm)} rpm
           </p>
         )}
-        {!isTape && <p>One turn takes {turnText(60 / outputRpm)}.</p>}
+        {!isTape && outputRpm > 0.1 && <p>One turn takes {roundDecimal(60 / outputRpm, 3)} s.</p>}
         {hasTarget && <p className="text-step1 font-semibold text-ink">{errorSentence(errorPercent, errorCents)}</p>}
         {hasTarget && (
           <p>
@@ -54,5 +54,3 @@ export function SpeedResults({ input, result, unit }: Props) {
     </>
   );
 }
-
-const turnText = (seconds: number) => (seconds < 1000 ? `${roundDecimal(seconds, 3)} s` : "longer than anybody waits");

@@ -28,7 +28,7 @@ export function StageFields({ stages, unit, errors, onStages }: Props) {
       {rows.map(({ name, stage, i }) => (
         <fieldset key={name} className="grid gap-3">
           <legend className="font-semibold">{stages.length > 1 ? name : "From the motor to the capstan"}</legend>
-          <div className="grid gap-x-6 gap-y-4 sm:grid-cols-3">
+          <div className="grid items-start gap-x-6 gap-y-4 sm:grid-cols-3">
             {parts.map((part) => (
               <LengthField
                 key={part}

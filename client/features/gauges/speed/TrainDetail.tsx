@@ -1,7 +1,8 @@
 import { LabelLines } from "./LabelLines";
 import type { Train } from "./layoutTrain";
 import { TrainShapes } from "./TrainShapes";
-import { type Detail, toPx } from "./trainSheet";
+import type { Detail } from "./trainDetails";
+import { toPx } from "./trainView";
 
 const thin = { stroke: "var(--color-ink)", strokeWidth: 0.9, fill: "none" };
 

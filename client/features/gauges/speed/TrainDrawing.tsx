@@ -48,7 +48,7 @@ export function TrainDrawing({ input, result, unit }: Props) {
         {details.map((detail) => (
           <TrainDetail key={detail.letter} detail={detail} train={train} cancels={result.cancels} id={id} />
         ))}
-        <PlanScale pxPerMm={plan.pxPerMm} unit={unit} y={height - 14} />
+        <PlanScale pxPerMm={plan.pxPerMm} unit={unit} y={sheet.scaleY} />
       </svg>
     </div>
   );
@@ -79,7 +79,7 @@ function PlanScale({ pxPerMm, unit, y }: { pxPerMm: number; unit: SizeUnit; y: n
         stroke="var(--color-soft)"
       />
       <text x={20 + width} y={y + 4} fontSize={12} fontWeight={500} fill="var(--color-soft)">
-        {Number(length.toPrecision(3))} {unit}. Distances between shafts suit the sheet.
+        {Number(length.toPrecision(3))} {unit}
       </text>
     </g>
   );

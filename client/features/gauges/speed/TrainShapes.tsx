@@ -1,24 +1,22 @@
+import { beltRuns } from "./beltRuns";
 import { platterMargin, type Train, type TrainBelt, type Wheel } from "./layoutTrain";
-import { toPx, type View } from "./trainSheet";
+import type { Point } from "./placeLabels";
+import { centreLines, toPx, type View } from "./trainView";
 
 const ink = { stroke: "var(--color-ink)", strokeWidth: 1.2 };
 const setting = { stroke: "var(--color-measured)", strokeWidth: 2.2 };
 
 /** Both straight runs and both arcs of an open belt, along its middle. */
-function beltPath({ from, to, thickness }: TrainBelt, view: View): string {
-  const [one, other] = [toPx(view, from), toPx(view, to)];
-  const [r1, r2] = [from, to].map(({ r }) => (r + thickness / 2) * view.pxPerMm) as [number, number];
-  const along = Math.atan2(other.y - one.y, other.x - one.x);
-  const lean = Math.acos((r1 - r2) / Math.hypot(other.x - one.x, other.y - one.y));
-  const at = ({ x, y }: { x: number; y: number }, r: number, angle: number) =>
-    `${(x + r * Math.cos(angle)).toFixed(2)} ${(y + r * Math.sin(angle)).toFixed(2)}`;
-  const isLong = lean > Math.PI / 2;
-  return [
-    `M${at(other, r2, along + lean)}`,
-    `A${r2} ${r2} 0 ${isLong ? 1 : 0} 0 ${at(other, r2, along - lean)}`,
-    `L${at(one, r1, along - lean)}`,
-    `A${r1} ${r1} 0 ${isLong ? 0 : 1} 0 ${at(one, r1, along + lean)}Z`,
-  ].join("");
+function beltPath(belt: TrainBelt, view: View): string {
+  const [r1, r2] = [belt.from, belt.to].map(({ r }) => (r + belt.thickness / 2) * view.pxPerMm) as [number, number];
+  const [[upperStart, upperEnd], [lowerStart, lowerEnd]] = beltRuns(belt);
+  const at = (point: Point) => {
+    const { x, y } = toPx(view, point);
+    return `${x.toFixed(2)} ${y.toFixed(2)}`;
+  };
+  // The larger wheel is wrapped by more than half.
+  const [onTo, onFrom] = r2 > r1 ? [1, 0] : [0, 1];
+  return `M${at(lowerEnd)}A${r2} ${r2} 0 ${onTo} 0 ${at(upperEnd)}L${at(upperStart)}A${r1} ${r1} 0 ${onFrom} 0 ${at(lowerStart)}Z`;
 }
 
 function WheelShape({ wheel, view, isPale }: { wheel: Wheel; view: View; isPale: boolean }) {
@@ -63,20 +61,9 @@ function WheelShape({ wheel, view, isPale }: { wheel: Wheel; view: View; isPale:
   );
 }
 
-/** A cross of centre lines on each shaft, a little longer than its largest wheel needs, where there is room for one. */
 function CentreLines({ wheel, view }: { wheel: Wheel; view: View }) {
-  const { x, y } = toPx(view, wheel);
-  const r = Math.min(wheel.r * view.pxPerMm, wheel.look === "rim" ? 26 : Infinity);
-  if (r < 9) return null;
-  const reach = wheel.look === "rim" ? r : r + 6;
-  return (
-    <path
-      d={`M${x - reach} ${y}H${x + reach}M${x} ${y - reach}V${y + reach}`}
-      stroke="var(--color-soft)"
-      strokeWidth={0.9}
-      strokeDasharray="10 3 2 3"
-    />
-  );
+  const d = centreLines(wheel, view).map(([from, to]) => `M${from.x} ${from.y}L${to.x} ${to.y}`);
+  return <path d={d.join("")} stroke="var(--color-soft)" strokeWidth={0.9} strokeDasharray="10 3 2 3" />;
 }
 
 /** The wheels, belts and tape of a drive at one scale. */

@@ -15,12 +15,21 @@ export const limitsOf = (medium: SpeedLimit["medium"]): readonly SpeedLimit[] =>
 const centSteps = [1, 2, 5, 10, 20, 50, 100, 200, 300, 600, 1200];
 const percentOfCents = (cents: number) => (2 ** (cents / 1200) - 1) * 100;
 
-/** Marks of the scale of cents, which are not evenly apart in percent: about as many as there is room for. */
-export function centMarks(range: number, most = 8): { cents: number; percent: number }[] {
-  const top = 1200 * Math.log2(1 + range / 100);
-  const step = centSteps.find((one) => top / one <= most / 2) ?? 1200 * Math.ceil(top / (most / 2) / 1200);
-  const count = Math.floor(top / step);
-  return Array.from({ length: 2 * count + 1 }, (_, i) => (i - count) * step)
-    .map((cents) => ({ cents, percent: percentOfCents(cents) }))
-    .filter(({ percent }) => percent >= -range);
+/** Marks of the scale of cents, which are not evenly apart in percent; `width` px hold the range on either side of zero. */
+export function centMarks(range: number, width: number, room = 44): { cents: number; percent: number }[] {
+  const least = (room / (width / 2)) * range;
+  const step =
+    centSteps.find((cents) => percentOfCents(cents) >= least) ?? 1200 * Math.ceil(Math.log2(1 + least / 100));
+  const marks = [{ cents: 0, percent: 0 }];
+  for (const sign of [1, -1]) {
+    let last = 0;
+    for (let cents = sign * step; Math.abs(percentOfCents(cents)) <= range; cents += sign * step) {
+      const percent = percentOfCents(cents);
+      // An octave down is only half as far as one up, and what follows closes up: those without room are left out.
+      if (Math.abs(percent - last) < least) break;
+      marks.push({ cents, percent });
+      last = percent;
+    }
+  }
+  return marks.sort((one, other) => one.cents - other.cents);
 }

@@ -26,6 +26,7 @@ export function semitoneWords(cents: number): string {
 
 /** A percentage with the decimals that it is worth, and its sign: "+1.35", "-0.26". */
 export function signed(value: number, decimals = 2): string {
+  if (Math.abs(value) >= 1e6) return `+${value.toPrecision(2)}`;
   const text = roundDecimal(value, Math.abs(value) >= 100 ? Math.min(decimals, 1) : decimals);
   return (Number(text) > 0 ? `+${text}` : text).replace("-", "−");
 }
@@ -34,6 +35,7 @@ export function signed(value: number, decimals = 2): string {
 export function errorSentence(errorPercent: number, errorCents: number): string {
   const size = Math.abs(errorPercent);
   if (size < rightPercent) return "Just right.";
+  if (errorPercent > 1000) return "More than ten times too fast.";
   const way = errorPercent > 0 ? "fast" : "slow";
   const figure = roundDecimal(size, size >= 1 ? 1 : 2);
   return `${figure} % ${way}: ${semitoneWords(errorCents)} ${errorCents > 0 ? "sharp" : "flat"}.`;

@@ -36,19 +36,17 @@ function layOutRim(input: RimDrive): Train {
   const fitsInside = turned < rim * 0.42 && step < rim * 0.25 && driving < rim * 0.42;
   const idler = along(centre, fitsInside ? 155 : 180, fitsInside ? rim - driving : rim + driving);
   const motor = along(idler, fitsInside ? -12 : 180, turned + step);
-  const wheels: Wheel[] = [{ ...centre, r: rim, look: "rim", field: "rimDiameter", shaft: plain ? 1 : 2 }];
+  const motorStep: Wheel = { ...motor, r: step, look: "metal", field: "stepDiameter", shaft: 0 };
+  const platter: Wheel = { ...centre, r: rim, look: "rim", field: "rimDiameter", shaft: plain ? 1 : 2 };
   if (plain) {
-    const isKnown = input.idlerDiameter !== undefined;
-    wheels.push({ ...idler, r: driving, look: isKnown ? "rubber" : "presumed", field: "idlerDiameter" });
-  } else {
-    const treads: Wheel[] = [
-      { ...idler, r: turned, look: "rubber", field: "idlerLargeDiameter", shaft: 1 },
-      { ...idler, r: driving, look: "rubber", field: "idlerSmallDiameter", shaft: 1 },
-    ];
-    wheels.push(...treads.sort((one, other) => other.r - one.r));
+    const look = input.idlerDiameter === undefined ? "presumed" : "rubber";
+    return { wheels: [platter, { ...idler, r: driving, look, field: "idlerDiameter" }, motorStep], belts: [] };
   }
-  wheels.push({ ...motor, r: step, look: "metal", field: "stepDiameter", shaft: 0 });
-  return { wheels, belts: [] };
+  const tread = (field: string, r: number): Wheel => ({ ...idler, r, look: "rubber", field, shaft: 1 });
+  const treads = [tread("idlerLargeDiameter", turned), tread("idlerSmallDiameter", driving)];
+  treads.sort((one, other) => other.r - one.r);
+  // The larger tread lies below the rim that the smaller one runs in.
+  return { wheels: [treads[0]!, platter, treads[1]!, motorStep], belts: [] };
 }
 
 function layOutBelt(input: Extract<SpeedInput, { drive: "belt" }>): Train {

@@ -1,7 +1,9 @@
 export type Point = { x: number; y: number };
 export type Box = { left: number; top: number; width: number; height: number };
-/** A circle that words should not lie across; a filled one they should not lie upon either. */
-export type Obstacle = Point & { r: number; isFilled: boolean };
+/** A circle that words should not lie across, and how bad it is if they lie upon it. */
+export type Obstacle = Point & { r: number; cost: number };
+/** A straight that words should not lie across, and how bad it is if they do: 200 for a belt. */
+export type LineObstacle = { line: readonly [Point, Point]; cost: number };
 export type LabelRequest = {
   key: string;
   /** The circle that the leader points at. */
@@ -51,6 +53,13 @@ function crossesBox(line: readonly [Point, Point], { left, top, width, height }:
   return line.some(isInside) || cross(line, falling) || cross(line, rising);
 }
 
+const inflated = ({ left, top, width, height }: Box): Box => ({
+  left: left - 4,
+  top: top - 4,
+  width: width + 8,
+  height: height + 8,
+});
+
 function candidates({ key, at, width, height }: LabelRequest): { placed: PlacedLabel; cost: number }[] {
   return directions.flatMap((angle) =>
     lengths.flatMap((length) =>
@@ -78,7 +87,7 @@ function candidates({ key, at, width, height }: LabelRequest): { placed: PlacedL
 export function placeLabels(
   requests: readonly LabelRequest[],
   obstacles: readonly Obstacle[],
-  boxes: readonly Box[],
+  lines: readonly LineObstacle[],
   region: Box,
 ): PlacedLabel[] {
   const outside = ({ left, top, width, height }: Box) =>
@@ -92,9 +101,9 @@ export function placeLabels(
       (cost, circle) => {
         const [nearest, farthest] = reachOf(box, circle);
         if (nearest - 3 >= circle.r) return cost;
-        return cost + (farthest + 3 > circle.r ? 80 : 0) + (circle.isFilled ? 70 : 0);
+        return cost + (farthest + 3 > circle.r ? 80 : 0) + circle.cost;
       },
-      boxes.filter((other) => overlap(box, other, 4)).length * 300,
+      lines.reduce((sum, { line, cost }) => sum + (crossesBox(line, inflated(box)) ? cost : 0), 0),
     );
 
   const clashes = ({ box, leader }: PlacedLabel, others: readonly PlacedLabel[]) =>

@@ -1,7 +1,7 @@
 import { DomainError } from "#shared/domain/DomainError";
 import type { SpeedInput } from "#shared/domain/driveTrain";
 import { parseLength } from "#shared/domain/length";
-import { slipOfMotor } from "#shared/domain/motorSpeed";
+import { motorSpeed, slipOfMotor } from "#shared/domain/motorSpeed";
 import { type SpeedResult, solveSpeed } from "#shared/domain/speed";
 import { readPlainNumber } from "../readPlainNumber";
 import { type SpeedState, sizesOf } from "./speedState";
@@ -32,13 +32,15 @@ class Reader {
   thickness(field: string, text: string): number {
     return readPlainNumber(text.replace(/\s*(?:mm|in)$/, "")) === 0
       ? 0
-      : this.length(field, text, "Write 0 where wheels touch.");
+      : this.length(field, text, "Measure it and write it here; next to a small pulley it counts.");
   }
 }
 
 const missingSize = "Measure it and write it here, like 44.1 mm.";
 
-function motorOf({ motor }: SpeedState, reader: Reader) {
+type ReadMotor = { mainsHz: number; poles: number } & ({ slipPercent: number } | { motorRpm: number });
+
+function motorOf({ motor }: SpeedState, reader: Reader): ReadMotor {
   const mainsHz =
     motor.mains === "other" ? reader.number("mainsHz", motor.mainsHz, "Which frequency, in Hz?") : Number(motor.mains);
   const poles = reader.number("poles", motor.poles, "How many poles has the motor?");
@@ -72,15 +74,35 @@ function sizesRead({ drive, sizes, stages }: SpeedState, reader: Reader): object
   };
 }
 
+const slipOf = (motor: ReadMotor) => ("motorRpm" in motor ? slipOfMotor(motor) : motor.slipPercent);
+
+/** The words of a refusal by their field; nothing where there is none. */
+function refusalOf(work: () => unknown): Record<string, string> {
+  try {
+    work();
+    return {};
+  } catch (error) {
+    if (error instanceof DomainError) return { [error.field]: error.words };
+    throw error;
+  }
+}
+
 /** Reads what was written and works it out. */
 export function readDrive(state: SpeedState): ReadDrive {
   const reader = new Reader(state.unit);
   const motor = motorOf(state, reader);
   const sizes = sizesRead(state, reader);
+  // What is wrong with the motor is said though sizes are wrong as well.
+  if (!["mainsHz", "poles", "slipPercent", "motorRpm"].some((field) => field in reader.errors)) {
+    Object.assign(
+      reader.errors,
+      refusalOf(() => motorSpeed({ ...motor, slipPercent: slipOf(motor) })),
+    );
+  }
   if (Object.keys(reader.errors).length > 0) return { ok: false, errors: reader.errors };
   try {
     const { mainsHz, poles } = motor;
-    const slipPercent = motor.slipPercent ?? slipOfMotor({ mainsHz, poles, motorRpm: motor.motorRpm });
+    const slipPercent = slipOf(motor);
     const target = state.target || undefined;
     // The names of the sizes are those of the drive, so together they are its input.
     const input = { drive: state.drive, mainsHz, poles, slipPercent, target, ...sizes } as SpeedInput;

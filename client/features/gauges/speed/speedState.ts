@@ -1,6 +1,6 @@
-import { parseLength } from "#shared/domain/length";
 import { type NominalSpeed, recordSpeeds, tapeSpeeds } from "#shared/domain/nominalSpeeds";
 import type { SizeUnit } from "../../../lib/formatSize";
+import { withItsUnit } from "../withItsUnit";
 
 export const drives = ["rim", "stepped-idler", "belt", "capstan"] as const;
 export type Drive = (typeof drives)[number];
@@ -81,16 +81,10 @@ export function withDrive(state: SpeedState, drive: Drive): SpeedState {
   };
 }
 
-/** A length that says nothing of its unit gets the one that it was meant in. */
-function inWords(text: string, unit: SizeUnit): string {
-  const [asMm, asIn] = [parseLength(text, "mm"), parseLength(text, "in")];
-  return asMm.ok && asIn.ok && asMm.mm !== asIn.mm ? `${text.trim()} ${unit}` : text;
-}
-
 /** Another unit to show and to write in; no size changes by it. */
 export function withUnit(state: SpeedState, unit: SizeUnit): SpeedState {
   if (unit === state.unit) return state;
-  const said = (text: string) => inWords(text, state.unit);
+  const said = (text: string) => withItsUnit(text, state.unit);
   return {
     ...state,
     unit,

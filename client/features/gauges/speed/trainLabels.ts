@@ -21,6 +21,7 @@ export const percentText = (percent: number): string => {
 
 /** A speed in turns a minute with four or five figures that count. */
 export const rpmText = (rpm: number): string => {
+  if (rpm >= 1e6) return rpm.toPrecision(3);
   if (rpm >= 1000) return roundDecimal(rpm, 0);
   return rpm >= 100 ? roundDecimal(rpm, 1) : rpm >= 0.1 ? roundDecimal(rpm, 2) : rpm.toPrecision(2);
 };
