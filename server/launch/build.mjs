@@ -14,6 +14,8 @@ const settings = ["index.html", "vite.config.ts", "tailwind.config.ts", "package
 /** Programs to run, and the source of each. */
 const programs = {
   "server/main": "server/main.ts",
+  // A thread of server/main, which looks for it beside itself.
+  "server/planWorker": "server/plans/planWorker.ts",
   "server/migrateMain": "server/migrateMain.ts",
   "server/seedMain": "server/demo/seedMain.ts",
   "fakes/main": "fakes/main.ts",
