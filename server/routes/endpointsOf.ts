@@ -3,7 +3,9 @@ import type { Services } from "../Services";
 import { addressRoutes } from "./addresses";
 import { authRoutes } from "./auth";
 import { basketRoutes } from "./basket";
+import { checkGaugeRoutes } from "./checkGauges";
 import { countryRoutes } from "./countries";
+import { driveGaugeRoutes } from "./driveGauges";
 import { familyRoutes } from "./families";
 import { gaugeRoutes } from "./gauges";
 import { orderRoutes } from "./orders";
@@ -25,6 +27,8 @@ export function endpointsOf(services: Services): Endpoint[] {
     ...orderRoutes(services),
     ...addressRoutes(),
     ...gaugeRoutes(),
+    ...driveGaugeRoutes(),
+    ...checkGaugeRoutes(),
     ...sheetRoutes(),
   ];
 }
