@@ -7,6 +7,7 @@ const places = [
   { to: "/find", words: "Find" },
   { to: "/families", words: "Families" },
   { to: "/workshops", words: "Workshops" },
+  { to: "/gauges", words: "Gauge desk" },
 ];
 
 function Account() {
@@ -40,7 +41,7 @@ export function Header() {
           <Mark />
           <span className="text-step2 font-extrabold tracking-tight">Idlewright</span>
         </Link>
-        <nav aria-label="Main" className="order-3 flex w-full gap-x-6 sm:order-none sm:w-auto">
+        <nav aria-label="Main" className="order-3 flex w-full flex-wrap gap-x-5 sm:gap-x-6 md:order-none md:w-auto">
           {places.map((place) => (
             <HeaderLink key={place.to} {...place} />
           ))}
