@@ -46,6 +46,13 @@ const SpeedPage = lazy(async () => ({ default: (await import("../features/gauges
 const BeltSamplePage = lazy(async () => ({
   default: (await import("../features/gauges/belt-sample/BeltSamplePage")).BeltSamplePage,
 }));
+const BeltRoutePage = lazy(async () => ({
+  default: (await import("../features/gauges/belt-route/BeltRoutePage")).BeltRoutePage,
+}));
+const GaugeDeskPage = lazy(async () => ({ default: (await import("../features/gauges/GaugeDeskPage")).GaugeDeskPage }));
+const TolerancesPage = lazy(async () => ({
+  default: (await import("../features/gauges/tolerances/TolerancesPage")).TolerancesPage,
+}));
 const ORingsPage = lazy(async () => ({ default: (await import("../features/gauges/o-rings/ORingsPage")).ORingsPage }));
 
 /**
@@ -65,6 +72,9 @@ export function AppRoutes() {
         <Route path="workshops/:slug" element={<WorkshopPage />} />
         <Route path="gauges/belt-sample" element={<BeltSamplePage />} />
         <Route path="gauges/speed" element={<SpeedPage />} />
+        <Route path="gauges/belt-route" element={<BeltRoutePage />} />
+        <Route path="gauges" element={<GaugeDeskPage />} />
+        <Route path="gauges/tolerances" element={<TolerancesPage />} />
         <Route path="gauges/o-rings" element={<ORingsPage />} />
         <Route path="guides" element={<GuidesPage />} />
         <Route path="guides/:slug" element={<GuidePage notFound={<NotFoundPage />} />} />
