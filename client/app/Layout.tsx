@@ -31,14 +31,17 @@ export function Layout({ hasStrip = false }: { hasStrip?: boolean }) {
         Skip to the content
       </a>
       <Header />
-      {hasStrip && <StripBar />}
-      <main id="main" ref={main} tabIndex={-1} className="min-h-[85dvh] flex-1">
-        <ErrorBoundary resetKey={pathname}>
-          <Suspense fallback={null}>
-            <Outlet />
-          </Suspense>
-        </ErrorBoundary>
-      </main>
+      {/* The page comes with the strip, never before it: else it would be pushed down. */}
+      <Suspense fallback={<div className="min-h-dvh" />}>
+        {hasStrip && <StripBar />}
+        <main id="main" ref={main} tabIndex={-1} className="min-h-[85dvh] flex-1">
+          <ErrorBoundary resetKey={pathname}>
+            <Suspense fallback={null}>
+              <Outlet />
+            </Suspense>
+          </ErrorBoundary>
+        </main>
+      </Suspense>
       <Footer />
       <LiveRegion />
     </div>

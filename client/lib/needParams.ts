@@ -42,23 +42,23 @@ export function readNeed(params: URLSearchParams, defaults: NeedDefaults): NeedV
   };
 }
 
-/**
- * The address of a need: only what was said, in the order in which it is said. Where no part is left, what was read from
- * one is not said; what was worked out is.
- */
+/** A need as the server is asked: where no part is left, without what cannot have been read from one. */
+export function askable(values: NeedValues): NeedValues {
+  if (conditionFacts[values.condition].hasReadings) return values;
+  const kept = Object.entries(values.lengths).filter(([, text]) => text && isWorkedOut(text));
+  return { ...values, lengths: Object.fromEntries(kept) };
+}
+
+/** The address of a need: only what was said, in the order in which it is said. */
 export function needParams(values: NeedValues): URLSearchParams {
   const params = new URLSearchParams();
   const put = (name: string, value: string | undefined, otherwise = "") => {
     if (value && value !== otherwise) params.set(name, value);
   };
   const words = values.q.trim();
-  const measured = conditionFacts[values.condition].hasReadings;
-  const sizes = dimensionsOf(values.kind).flatMap((name) => {
-    const text = values.lengths[name]?.trim();
-    return text && (measured || isWorkedOut(text)) ? [[name, text] as const] : [];
-  });
-  if (sizes.length > 0 || values.family || !words) params.set("kind", values.kind);
-  for (const [name, text] of sizes) params.set(name, text);
+  const texts = dimensionsOf(values.kind).map((name) => [name, values.lengths[name]?.trim()] as const);
+  if (texts.some(([, text]) => text) || values.family || !words) params.set("kind", values.kind);
+  for (const [name, text] of texts) put(name, text);
   put("instrument", values.instrument, "digital-caliper");
   put("condition", values.condition, "sound");
   put("family", values.family);

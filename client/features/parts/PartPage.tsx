@@ -6,7 +6,7 @@ import type { PartSummary } from "#shared/schemas/part";
 import { ApiProblem } from "../../lib/ApiProblem";
 import { capitalised } from "../../lib/capitalised";
 import type { SizeUnit } from "../../lib/formatSize";
-import { needOnly, needParams, readNeed } from "../../lib/needParams";
+import { askable, needOnly, needParams, readNeed } from "../../lib/needParams";
 import { useShipTo, useUnit } from "../../lib/preferences";
 import { useTitle } from "../../lib/useTitle";
 import { FailureNotice } from "../../ui/FailureNotice";
@@ -26,7 +26,7 @@ function useNeed() {
   const [params] = useSearchParams();
   const [shipTo, unit] = [useShipTo(), useUnit()];
   return useMemo(() => {
-    const need = readNeed(params, { shipTo, unit });
+    const need = askable(readNeed(params, { shipTo, unit }));
     const query = needOnly(needParams(need));
     query.delete("q");
     if (Object.keys(need.lengths).length === 0 && !need.family) query.delete("kind");

@@ -26,6 +26,8 @@ type Props = {
   /** What was understood of it; undefined where nothing is written, or what reads it is still on its way. */
   size: ParsedSize | undefined;
   problem: string | undefined;
+  /** Not searched as it stands. */
+  isLeftOut: boolean;
   example: string;
   /** Whether an instrument was put to a part; else only what was worked out can be written. */
   isMeasured: boolean;
@@ -35,13 +37,16 @@ type Props = {
 };
 
 /** One size in the sentence: its name, the length as one writes it, and what was understood. */
-export function LengthSlot({ name, text, size, problem, example, isMeasured, onText, onRemove }: Props) {
+export function LengthSlot(props: Props) {
+  const { name, text, size, problem, isLeftOut, example, isMeasured, onText, onRemove } = props;
   // What is wrong from the start came with the address, and is not being written.
   const [isSettled, setSettled] = useState(problem !== undefined);
   const input = useRef<HTMLInputElement>(null);
   const id = slotId(name);
   const shownProblem = isSettled ? problem : undefined;
   const { echo, canGoOn } = understood(text, size);
+  const note =
+    shownProblem ?? (isLeftOut ? `Not searched until a ± says how far it may be off: ${example}.` : undefined);
   const width = { "--slot-width": `${Math.max(text.length, example.length) + 1}ch` } as CSSProperties;
 
   const goOn = () => {
@@ -72,7 +77,7 @@ export function LengthSlot({ name, text, size, problem, example, isMeasured, onT
           className="slot slot-measured"
           style={width}
           aria-invalid={shownProblem ? true : undefined}
-          aria-describedby={`${id}-echo${shownProblem ? ` ${id}-problem` : ""}`}
+          aria-describedby={`${id}-echo${note ? ` ${id}-note` : ""}`}
           onChange={(event) => onText(event.target.value)}
           onBlur={() => setSettled(true)}
           onInvalid={() => setSettled(true)}
@@ -98,9 +103,9 @@ export function LengthSlot({ name, text, size, problem, example, isMeasured, onT
           </button>
         )}
       </span>
-      {shownProblem && (
-        <span id={`${id}-problem`} className="strip-problem">
-          {shownProblem}
+      {note && (
+        <span id={`${id}-note`} className={`strip-note ${shownProblem ? "strip-problem" : ""}`}>
+          {note}
         </span>
       )}
     </span>

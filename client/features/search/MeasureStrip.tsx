@@ -61,7 +61,8 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   const submit = async (event: FormEvent) => {
     event.preventDefault();
     const asRead = sizesAsRead(values, read ?? (await fetchRead()));
-    const wrong = shown.find((name) => asRead[name]?.problem);
+    const asksBeside = family || values.q || shown.some((name) => values.lengths[name] && !asRead[name]?.isLeftOut);
+    const wrong = shown.find((name) => asRead[name]?.problem || (asRead[name]?.isLeftOut && !asksBeside));
     if (wrong) {
       const field = document.getElementById(slotId(wrong));
       field?.focus();
@@ -69,7 +70,10 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
       return;
     }
     keepShipTo(shipTo);
-    void navigate(`${action}?${needParams(values)}`, { state: location.pathname === action ? location.state : null });
+    const lengths = Object.fromEntries(shown.map((name) => [name, values.lengths[name]]));
+    void navigate(`${action}?${needParams({ ...values, lengths })}`, {
+      state: location.pathname === action ? location.state : null,
+    });
   };
 
   const familyName = families.find(({ slug }) => slug === family)?.name ?? family;

@@ -4,7 +4,7 @@ import { useSearchParams } from "react-router-dom";
 import { kindFacts } from "#shared/domain/partKinds";
 import { ApiProblem } from "../../lib/ApiProblem";
 import { announce } from "../../lib/announcements";
-import { needOnly, needParams, readNeed } from "../../lib/needParams";
+import { askable, needOnly, needParams, readNeed } from "../../lib/needParams";
 import { useShipTo, useUnit } from "../../lib/preferences";
 import { useTitle } from "../../lib/useTitle";
 import { FailureNotice } from "../../ui/FailureNotice";
@@ -19,7 +19,7 @@ function useQueryParams() {
   const [params] = useSearchParams();
   const [shipTo, unit] = [useShipTo(), useUnit()];
   return useMemo(() => {
-    const need = readNeed(params, { shipTo, unit });
+    const need = askable(readNeed(params, { shipTo, unit }));
     const query = needParams(need);
     const needKey = query.toString();
     for (const name of ["estimateMm", "sort", "offer", "material", "minChance"]) {

@@ -1,4 +1,3 @@
-import { Suspense } from "react";
 import { Link, useLocation, useSearchParams } from "react-router-dom";
 import { needOnly, needParams, readNeed } from "../../lib/needParams";
 import { useShipTo, useUnit } from "../../lib/preferences";
@@ -33,15 +32,13 @@ export function StripBar() {
   const initial = place === "families" && name ? { ...read, family: name } : read;
   // Another need in the address is another sentence; what is typed meanwhile stays as long as the address does.
   return (
-    <Suspense fallback={null}>
-      <MeasureStrip
-        key={`${place}?${needParams(initial)}`}
-        initial={initial}
-        look={looks[place] ?? "compact"}
-        action={isPart ? pathname : "/find"}
-        submitWords={isPart ? "Check" : "Find"}
-        aside={isPart && <BackToResults />}
-      />
-    </Suspense>
+    <MeasureStrip
+      key={`${place}?${needParams(initial)}`}
+      initial={initial}
+      look={looks[place] ?? "compact"}
+      action={isPart ? pathname : "/find"}
+      submitWords={isPart ? "Check" : "Find"}
+      aside={isPart && <BackToResults />}
+    />
   );
 }

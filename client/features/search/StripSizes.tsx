@@ -36,6 +36,7 @@ export function StripSizes({ strip, isCompact, sizes, onFocus }: Props) {
             text={values.lengths[name] ?? ""}
             size={sizes[name]?.size}
             problem={sizes[name]?.problem}
+            isLeftOut={sizes[name]?.isLeftOut ?? false}
             example={exampleOf(name, isMeasured)}
             isMeasured={isMeasured}
             onText={(text) => strip.setLength(name, text)}

@@ -6,7 +6,9 @@ import { isWorkedOut } from "#shared/domain/writtenSize";
 import { type NeedValues, primaryOf } from "../../lib/needParams";
 import type { SizeReader } from "../../lib/sizeReader";
 
-export type SizesAsRead = Partial<Record<DimensionName, { size: ParsedSize; problem: string | undefined }>>;
+/** `isLeftOut`: it is clear, but no part is left that it could have been read from, and so it is not searched. */
+type SizeAsRead = { size: ParsedSize; problem: string | undefined; isLeftOut: boolean };
+export type SizesAsRead = Partial<Record<DimensionName, SizeAsRead>>;
 
 /** What is understood of the sizes as written, and what is wrong with each in words; empty ones are not wrong. */
 export function sizesAsRead({ kind, lengths, unit, condition }: NeedValues, read: SizeReader | undefined): SizesAsRead {
@@ -15,9 +17,8 @@ export function sizesAsRead({ kind, lengths, unit, condition }: NeedValues, read
     const text = lengths[name]?.trim();
     if (!text || !read) continue;
     const size = read(text, unit);
-    const isOfNothing = size.ok && "readingsMm" in size && !conditionFacts[condition].hasReadings;
-    const words = `A ${condition} part cannot be measured. Write what was worked out, with a ± behind it, or choose another condition.`;
-    sizes[name] = { size, problem: size.ok ? (isOfNothing ? words : undefined) : size.problem };
+    const isLeftOut = "readingsMm" in size && !conditionFacts[condition].hasReadings;
+    sizes[name] = { size, problem: size.ok ? undefined : size.problem, isLeftOut };
   }
   return sizes;
 }

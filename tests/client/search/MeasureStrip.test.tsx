@@ -5,8 +5,10 @@ import { StripBar } from "../../../client/features/search/StripBar";
 import { renderAt } from "../support/renderAt";
 import { stubApi } from "../support/stubApi";
 
-const renderStrip = (address = "/") =>
+async function renderStrip(address = "/") {
   renderAt(address, { "/": null, "/find": null, "/parts/:id": null }, <StripBar />);
+  await screen.findByLabelText("Kind of part");
+}
 
 const address = () => screen.getByLabelText("address").textContent ?? "";
 const query = () => Object.fromEntries(new URLSearchParams(address().split("?")[1]));
@@ -20,15 +22,14 @@ beforeEach(() => {
 
 describe("the measure strip", () => {
   it("shows back what it understood of a fraction, and writes the need into the address", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.type(diameter(), "1-47/64");
     expect(diameter()).toHaveAccessibleDescription(/in = 44\.05 mm/);
 
     await userEvent.selectOptions(screen.getByLabelText("Condition of the old part"), "glazed");
     await userEvent.type(diameter(), "{Enter}");
-    const [path, query] = address().split("?");
-    expect(path).toBe("/find");
-    expect(Object.fromEntries(new URLSearchParams(query))).toEqual({
+    await waitFor(() => expect(address()).toMatch(/^\/find\?/));
+    expect(query()).toEqual({
       kind: "idler-wheel",
       outsideDiameter: "1-47/64",
       condition: "glazed",
@@ -37,7 +38,7 @@ describe("the measure strip", () => {
   });
 
   it("refuses nonsense in words beside the field, keeps it, and stays", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.type(diameter(), "about so{Enter}");
     await waitFor(() => expect(diameter()).toHaveAccessibleDescription(/does not begin with a number/));
     expect(diameter()).toBeInvalid();
@@ -47,7 +48,7 @@ describe("the measure strip", () => {
   });
 
   it("adds a size of the kind and puts the cursor there, and takes it out again", async () => {
-    renderStrip("/?kind=idler-wheel&outsideDiameter=44.1");
+    await renderStrip("/?kind=idler-wheel&outsideDiameter=44.1");
     await userEvent.selectOptions(screen.getByLabelText("Add a size"), "bore");
     expect(screen.getByRole("textbox", { name: "bore" })).toHaveFocus();
     await userEvent.click(screen.getByRole("button", { name: "Leave out bore" }));
@@ -55,7 +56,7 @@ describe("the measure strip", () => {
   });
 
   it("offers only conditions that the kind can be in, and drops one that the new kind cannot", async () => {
-    renderStrip("/?kind=flat-belt&condition=slack");
+    await renderStrip("/?kind=flat-belt&condition=slack");
     const condition = screen.getByLabelText("Condition of the old part");
     expect(condition).toHaveDisplayValue("slack");
     await userEvent.selectOptions(screen.getByLabelText("Kind of part"), "idler wheel");
@@ -64,13 +65,13 @@ describe("the measure strip", () => {
   });
 
   it("works out the size when new as it is written, and says why", async () => {
-    renderStrip("/?kind=idler-wheel&outsideDiameter=44.05&condition=glazed");
+    await renderStrip("/?kind=idler-wheel&outsideDiameter=44.05&condition=glazed");
     expect(await screen.findByText(/As new it was about/)).toHaveTextContent("44.15 ± 0.17");
     expect(screen.getByText("Being glazed took about 0.10 mm from the outside diameter")).toBeInTheDocument();
   });
 
   it("is reached by the slash key from anywhere but a field", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.keyboard("/");
     expect(diameter()).toHaveFocus();
     await userEvent.keyboard("/");
@@ -80,7 +81,7 @@ describe("the measure strip", () => {
 
 describe("several readings of a size", () => {
   it("are written one after another, and shown back as their mean", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.type(diameter(), "44.1");
     await userEvent.click(screen.getByRole("button", { name: "+ reading of the outside diameter" }));
     expect(diameter()).toHaveFocus();
@@ -92,14 +93,14 @@ describe("several readings of a size", () => {
   });
 
   it("name the one that cannot be read", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.type(diameter(), "44.1; x{Enter}");
     await waitFor(() => expect(diameter()).toHaveAccessibleDescription(/Reading 2: “x”/));
     expect(address()).toBe("/");
   });
 
   it("say so where they show a flat spot", async () => {
-    renderStrip("/?kind=idler-wheel&outsideDiameter=44.00;+43.70;+44.00");
+    await renderStrip("/?kind=idler-wheel&outsideDiameter=44.00;+43.70;+44.00");
     expect(await screen.findByText("Flat spot: the readings differ by 0.30 mm")).toBeInTheDocument();
     expect(screen.getByText(/As new it was about/)).toHaveTextContent("44.00");
   });
@@ -109,7 +110,7 @@ describe("a part that is gone", () => {
   const belt = "/?kind=flat-belt&insideCircumference=540&width=5.0+mm&family=lean-deck&shipTo=NO";
 
   it("leads a belt to its pulleys, with all that is known of it but its length", async () => {
-    renderStrip(belt);
+    await renderStrip(belt);
     await choose("Condition of the old part", "missing");
     expect(screen.queryByLabelText("inside circumference")).not.toBeInTheDocument();
     const [path, params] = ((await hrefOf("work it out from the pulleys")) ?? "").split("?");
@@ -124,7 +125,7 @@ describe("a part that is gone", () => {
   });
 
   it("takes its readings back when it turns up again", async () => {
-    renderStrip(belt);
+    await renderStrip(belt);
     await choose("Condition of the old part", "melted");
     expect(screen.queryByLabelText("width")).not.toBeInTheDocument();
     await choose("Condition of the old part", "slack");
@@ -133,14 +134,14 @@ describe("a part that is gone", () => {
   });
 
   it("leads a wheel to the register of its mechanism, and to what else helps", async () => {
-    renderStrip("/?kind=idler-wheel&condition=missing&family=lean-deck");
+    await renderStrip("/?kind=idler-wheel&condition=missing&family=lean-deck");
     expect(await hrefOf("its mechanism")).toBe("/families/lean-deck");
     expect(await hrefOf("guides")).toBe("/guides");
     expect(screen.queryByText("How to measure it")).not.toBeInTheDocument();
   });
 
   it("is searched by a size that was worked out, which stands in the sentence and can be changed", async () => {
-    renderStrip("/?kind=flat-belt&insideCircumference=532+%C2%B1+8+mm&condition=missing");
+    await renderStrip("/?kind=flat-belt&insideCircumference=532+%C2%B1+8+mm&condition=missing");
     const length = screen.getByLabelText("inside circumference");
     expect(length).toHaveValue("532 ± 8 mm");
     expect(length.parentElement).toHaveTextContent("worked out as");
@@ -159,23 +160,37 @@ describe("a part that is gone", () => {
     expect(screen.getByLabelText("inside circumference")).toHaveAccessibleDescription("530 ± 6 mm");
   });
 
-  it("takes no reading, says how to write what was worked out, and stays", async () => {
-    renderStrip("/?kind=flat-belt&condition=missing");
+  it("takes no reading, says how to write what was worked out, and stays where nothing else is asked", async () => {
+    await renderStrip("/?kind=flat-belt&condition=missing");
     await choose("Add a size", "width");
     const width = screen.getByLabelText("width");
     expect(width).toHaveFocus();
-    await userEvent.type(width, "5.0{Enter}");
-    await waitFor(() => expect(width).toHaveAccessibleDescription(/Write what was worked out, with a ± behind it/));
-    expect(width).toBeInvalid();
+    await userEvent.type(width, "5.0");
+    expect(width).toHaveAccessibleDescription(/Not searched until a ± says how far it may be off: 4 ± 0.2 mm/);
+    await userEvent.keyboard("{Enter}");
+    expect(width).toHaveFocus();
     expect(address()).toBe("/?kind=flat-belt&condition=missing");
     await userEvent.type(width, " ± 0.3{Enter}");
     await waitFor(() => expect(query().width).toBe("5.0 ± 0.3"));
+  });
+
+  it("keeps a reading that came with a worked-out size, and says that it is not searched", async () => {
+    const address = "/find?kind=flat-belt&insideCircumference=532+%C2%B1+8+mm&thickness=1.2+mm&condition=missing";
+    await renderStrip(address);
+    const thickness = screen.getByLabelText("thickness");
+    expect(thickness).toHaveValue("1.2 mm");
+    expect(thickness).not.toBeInvalid();
+    expect(thickness).toHaveAccessibleDescription(/Not searched until/);
+    await choose("Condition of the old part", "missing");
+    await userEvent.click(screen.getByRole("button", { name: "Find" }));
+    await waitFor(() => expect(query().shipTo).toBe("DE"));
+    expect(query().thickness).toBe("1.2 mm");
   });
 });
 
 describe("help with measuring", () => {
   it("shows how the sizes in the sentence are measured, and follows them", async () => {
-    renderStrip();
+    await renderStrip();
     await userEvent.click(screen.getByText("How to measure it"));
     expect(await screen.findByText("Common mistakes")).toBeInTheDocument();
     expect(screen.getByText("Outside diameter.")).toBeInTheDocument();
@@ -187,7 +202,9 @@ describe("help with measuring", () => {
   });
 
   it("offers other ways to measure a belt, and takes along what was read", async () => {
-    renderStrip("/?kind=square-belt&insideCircumference=540;+541&section=2.0&condition=slack&instrument=steel-rule");
+    await renderStrip(
+      "/?kind=square-belt&insideCircumference=540;+541&section=2.0&condition=slack&instrument=steel-rule",
+    );
     const [path, params] = ((await hrefOf("Laid flat, or on a cone")) ?? "").split("?");
     expect(path).toBe("/gauges/belt-sample");
     expect(Object.fromEntries(new URLSearchParams(params))).toEqual({
