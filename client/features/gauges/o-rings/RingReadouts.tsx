@@ -3,6 +3,7 @@ import { stretchPercentOf } from "#shared/domain/oRings";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { LinkButton } from "../../../ui/LinkButton";
 import { Readout } from "../Readout";
+import { percentText } from "./percentText";
 import { RingSize } from "./RingSize";
 import type { RingNeed } from "./ringNeed";
 import { StretchScale } from "./StretchScale";
@@ -65,7 +66,7 @@ function Stretch({ need }: { need: RingNeed }) {
   const { onSeat, use, picked, seatMm } = need;
   const percent = onSeat.stretchPercent;
   const [least, most] = [1, -1].map((way) =>
-    stretchPercentOf(picked.insideDiameterMm + way * picked.insideDiameterTolMm, seatMm).toFixed(1),
+    percentText(stretchPercentOf(picked.insideDiameterMm + way * picked.insideDiameterTolMm, seatMm)),
   );
   const advice = use === "belt" ? stretchAdvice.belt : stretchAdvice.seat;
   const [from, to] = use === "belt" ? [4, 16] : [-2, 8];
@@ -78,7 +79,7 @@ function Stretch({ need }: { need: RingNeed }) {
           ? "Too much."
           : "Inside.";
   return (
-    <Readout label="Stretch in place" value={percent.toFixed(1)} unit="%">
+    <Readout label="Stretch in place" value={percentText(percent)} unit="%">
       <StretchScale percent={percent} advice={advice} from={from} to={to} />
       <p>
         From {least} to {most} % over the ring’s tolerance.

@@ -1,6 +1,6 @@
-import { roundDecimal } from "#shared/domain/roundDecimal";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { RuledHeading } from "../../../ui/RuledHeading";
+import { percentText } from "./percentText";
 import { RingSize } from "./RingSize";
 import type { RingNeed } from "./ringNeed";
 
@@ -12,8 +12,8 @@ type Props = {
   onPick: (dash: string) => void;
 };
 
-const withMinus = (number: string) => number.replace("-", "\u2212");
-const signed = (mm: number, unit: SizeUnit) => `${mm > 0 ? "+" : ""}${withMinus(roundedSize(mm, unit))} ${unit}`;
+const signed = (mm: number, unit: SizeUnit) =>
+  `${mm > 0 ? "+" : ""}${roundedSize(mm, unit).replace("-", "\u2212")} ${unit}`;
 
 /** The nearest sizes, nearest first. Each row lights its mark on the rail; its number draws it. */
 export function RingRows({ need, unit, litDash, onLight, onPick }: Props) {
@@ -64,7 +64,7 @@ export function RingRows({ need, unit, litDash, onLight, onPick }: Props) {
                 {ring.isInside && "● "}
                 {isInPlace
                   ? signed(ring.insideDiameterMm - need.seatMm, unit)
-                  : `${withMinus(roundDecimal(ring.stretchPercent, 1))} %`}
+                  : `${percentText(ring.stretchPercent)} %`}
               </td>
             </tr>
           ))}

@@ -59,7 +59,7 @@ export function SectionDetail({ need, unit, hatchId, ringScale, box }: Props) {
         </tspan>
       </text>
       <text x={cx} y={seatY + depth + 38} textAnchor="middle" fontSize={13.3} fill="var(--color-soft)">
-        {magnified > 1 ? `section, ${magnified} × the ring` : "section, as the ring"}
+        {magnified > 1 ? `section, ${magnified} × the ring` : "section, same scale"}
       </text>
     </g>
   );

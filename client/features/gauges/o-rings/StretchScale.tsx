@@ -1,3 +1,5 @@
+import { percentText } from "./percentText";
+
 type Props = {
   percent: number;
   advice: { min: number; ideal: number; max: number };
@@ -19,7 +21,7 @@ export function StretchScale({ percent, advice, from, to }: Props) {
   const colour = isInside ? "var(--color-inband)" : "var(--color-outband)";
   const way = percent < from ? -1 : 1;
   const marks = Array.from({ length: to - from + 1 }, (_, i) => from + i);
-  const words = `${percent.toFixed(1)} %; advised from ${advice.min} to ${advice.max} %, ideally ${advice.ideal} %`;
+  const words = `${percentText(percent)} %; advised from ${advice.min} to ${advice.max} %, ideally ${advice.ideal} %`;
   return (
     <svg viewBox={`0 0 ${width} 54`} className="block w-full max-w-[300px]" role="img" aria-label={words}>
       <rect
@@ -37,7 +39,7 @@ export function StretchScale({ percent, advice, from, to }: Props) {
           <path d={`M0 0V${value % 2 === 0 ? 6 : 3}`} stroke="var(--color-ink)" />
           {value % 2 === 0 && (
             <text y={20} textAnchor="middle" fontSize={13} fill="var(--color-ink)">
-              {value}
+              {value < 0 ? `\u2212${-value}` : value}
             </text>
           )}
         </g>
