@@ -46,7 +46,7 @@ export function LengthSlot(props: Props) {
   const shownProblem = isSettled ? problem : undefined;
   const { echo, canGoOn } = understood(text, size);
   const note =
-    shownProblem ?? (isLeftOut ? `Not searched until a ± says how far it may be off: ${example}.` : undefined);
+    shownProblem ?? (isLeftOut ? `Not searched until a ± says how far it may be off, as in ${example}.` : undefined);
   const width = { "--slot-width": `${Math.max(text.length, example.length) + 1}ch` } as CSSProperties;
 
   const goOn = () => {
@@ -57,7 +57,7 @@ export function LengthSlot(props: Props) {
   };
 
   return (
-    <span className="strip-size">
+    <span className={note ? "strip-size-noted" : "strip-size"}>
       <span>
         <label htmlFor={id} className="text-soft">
           <DimensionLabel name={name} />{" "}
@@ -86,7 +86,13 @@ export function LengthSlot(props: Props) {
           {echo}
         </span>
         {canGoOn && isMeasured && (
-          <button type="button" className="strip-more" onClick={goOn}>
+          <button
+            type="button"
+            className={`strip-more ${onRemove ? "strip-more-late" : ""}`}
+            // The field keeps the focus, and with it this button stays in sight until it is let go.
+            onMouseDown={(event) => event.preventDefault()}
+            onClick={goOn}
+          >
             + reading <span className="sr-only">of the {dimensionWords[name]}</span>
           </button>
         )}

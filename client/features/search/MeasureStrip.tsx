@@ -8,9 +8,8 @@ import { type Instrument, instrumentFacts, instruments } from "#shared/domain/in
 import { type DimensionName, kindFacts, type PartKind, partKinds } from "#shared/domain/partKinds";
 import { countriesQuery, familiesQuery } from "../../lib/catalogue";
 import { offerStrip } from "../../lib/focusStrip";
-import { type NeedValues, needParams, primaryOf } from "../../lib/needParams";
+import { isBelt, type NeedValues, needParams, primaryOf } from "../../lib/needParams";
 import { keepShipTo } from "../../lib/preferences";
-import { useSizeReader } from "../../lib/sizeReader";
 import { Button } from "../../ui/Button";
 import { slotId } from "./LengthSlot";
 import { StripNotes } from "./StripNotes";
@@ -18,6 +17,7 @@ import { StripSelect } from "./StripSelect";
 import { StripSizes } from "./StripSizes";
 import { useSlashKey } from "./useSlashKey";
 import { sizesAsRead, useStrip } from "./useStrip";
+import { useStripTools } from "./useStripTools";
 
 export type StripLook = "large" | "plain" | "compact";
 
@@ -43,8 +43,8 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   const navigate = useNavigate();
   const location = useLocation();
   const form = useRef<HTMLFormElement>(null);
-  const { read, fetchRead } = useSizeReader(Object.keys(initial.lengths).length > 0);
-  const sizes = sizesAsRead(values, read);
+  const { tools, fetchTools } = useStripTools(!isMeasured || isBelt(kind) || Object.keys(initial.lengths).length > 0);
+  const sizes = sizesAsRead(values, tools);
   const large = look === "large";
 
   const focusSize = (name: DimensionName) => {
@@ -60,7 +60,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
 
   const submit = async (event: FormEvent) => {
     event.preventDefault();
-    const asRead = sizesAsRead(values, read ?? (await fetchRead()));
+    const asRead = sizesAsRead(values, tools ?? (await fetchTools()));
     const asksBeside = family || values.q || shown.some((name) => values.lengths[name] && !asRead[name]?.isLeftOut);
     const wrong = shown.find((name) => asRead[name]?.problem || (asRead[name]?.isLeftOut && !asksBeside));
     if (wrong) {
@@ -83,7 +83,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
         ref={form}
         action={action}
         method="get"
-        onFocus={read ? undefined : () => void fetchRead()}
+        onFocus={tools ? undefined : () => void fetchTools()}
         onSubmit={(event) => void submit(event)}
         className={`page strip strip-${look}`}
         noValidate
@@ -176,7 +176,7 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
         </div>
         {aside}
         <div className={`strip-notes ${look === "compact" ? "hidden" : ""}`}>
-          <StripNotes strip={strip} />
+          <StripNotes strip={strip} tools={tools} />
           <label className="flex items-baseline gap-x-2 whitespace-nowrap text-soft">
             Or words
             <input

@@ -24,6 +24,7 @@ export function NoParts({ answer }: { answer: SearchAnswer }) {
   const [params] = useSearchParams();
   const { need } = answer;
   const isMeasured = need.dimensions.length > 0;
+  const isWorkedOut = need.dimensions.some(({ text, asFoundMm }) => text !== null && asFoundMm === null);
   const filters = appliedFilters(params);
   const wider = [
     ...filters.map(({ name, words }) => ({ to: withParam(params, name, ""), words: `not only ${words}` })),
@@ -59,9 +60,11 @@ export function NoParts({ answer }: { answer: SearchAnswer }) {
         </>
       )}
       <p className="text-soft">
-        {isMeasured
-          ? "Measure once more if you can: three readings around a wheel, rubber hardly touched, written with all their digits."
-          : "A size finds more than words do: measure what is left, and write it in the sentence above."}
+        {isWorkedOut
+          ? "A worked-out size is as good as what it was worked out from: check that once more, or allow it a wider ±."
+          : isMeasured
+            ? "Measure once more if you can: three readings around a wheel, rubber hardly touched, written with all their digits."
+            : "A size finds more than words do: measure what is left, and write it in the sentence above."}
       </p>
     </Notice>
   );

@@ -4,19 +4,22 @@ import type { ParsedSize } from "#shared/domain/parseSize";
 import { type DimensionName, dimensionsOf, type PartKind } from "#shared/domain/partKinds";
 import { isWorkedOut } from "#shared/domain/writtenSize";
 import { type NeedValues, primaryOf } from "../../lib/needParams";
-import type { SizeReader } from "../../lib/sizeReader";
+import type { StripTools } from "./useStripTools";
 
 /** `isLeftOut`: it is clear, but no part is left that it could have been read from, and so it is not searched. */
 type SizeAsRead = { size: ParsedSize; problem: string | undefined; isLeftOut: boolean };
 export type SizesAsRead = Partial<Record<DimensionName, SizeAsRead>>;
 
 /** What is understood of the sizes as written, and what is wrong with each in words; empty ones are not wrong. */
-export function sizesAsRead({ kind, lengths, unit, condition }: NeedValues, read: SizeReader | undefined): SizesAsRead {
+export function sizesAsRead(
+  { kind, lengths, unit, condition }: NeedValues,
+  tools: StripTools | undefined,
+): SizesAsRead {
   const sizes: SizesAsRead = {};
   for (const name of dimensionsOf(kind)) {
     const text = lengths[name]?.trim();
-    if (!text || !read) continue;
-    const size = read(text, unit);
+    if (!text || !tools) continue;
+    const size = tools.parseSize(text, unit);
     const isLeftOut = "readingsMm" in size && !conditionFacts[condition].hasReadings;
     sizes[name] = { size, problem: size.ok ? undefined : size.problem, isLeftOut };
   }

@@ -166,7 +166,7 @@ describe("a part that is gone", () => {
     const width = screen.getByLabelText("width");
     expect(width).toHaveFocus();
     await userEvent.type(width, "5.0");
-    expect(width).toHaveAccessibleDescription(/Not searched until a ± says how far it may be off: 4 ± 0.2 mm/);
+    expect(width).toHaveAccessibleDescription(/Not searched until a ± says how far it may be off, as in 4 ± 0.2 mm/);
     await userEvent.keyboard("{Enter}");
     expect(width).toHaveFocus();
     expect(address()).toBe("/?kind=flat-belt&condition=missing");

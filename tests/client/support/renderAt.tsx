@@ -3,11 +3,11 @@ import { render } from "@testing-library/react";
 import { Suspense } from "react";
 import { MemoryRouter, Route, Routes, useLocation } from "react-router-dom";
 import { LiveRegion } from "../../../client/app/LiveRegion";
+import { fetchStripTools } from "../../../client/features/search/useStripTools";
 import { forgetToken } from "../../../client/lib/api";
-import { fetchSizeReader } from "../../../client/lib/sizeReader";
 
 // The strip waits for it where sizes stand in the address, and a rendering under test does not.
-await fetchSizeReader();
+await fetchStripTools();
 
 /** Where the router stands, to be read by tests. */
 function Where() {
