@@ -49,6 +49,7 @@ const BeltSamplePage = lazy(async () => ({
 const BeltRoutePage = lazy(async () => ({
   default: (await import("../features/gauges/belt-route/BeltRoutePage")).BeltRoutePage,
 }));
+const SheetsPage = lazy(async () => ({ default: (await import("../features/gauges/sheets/SheetsPage")).SheetsPage }));
 const GaugeDeskPage = lazy(async () => ({ default: (await import("../features/gauges/GaugeDeskPage")).GaugeDeskPage }));
 const TolerancesPage = lazy(async () => ({
   default: (await import("../features/gauges/tolerances/TolerancesPage")).TolerancesPage,
@@ -76,6 +77,7 @@ export function AppRoutes() {
         <Route path="gauges" element={<GaugeDeskPage />} />
         <Route path="gauges/tolerances" element={<TolerancesPage />} />
         <Route path="gauges/o-rings" element={<ORingsPage />} />
+        <Route path="gauges/sheets" element={<SheetsPage />} />
         <Route path="guides" element={<GuidesPage />} />
         <Route path="guides/:slug" element={<GuidePage notFound={<NotFoundPage />} />} />
         <Route path="working" element={<Navigate to="/guides/fit-chance" replace />} />

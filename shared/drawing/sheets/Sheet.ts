@@ -11,7 +11,7 @@ export type Sheet = {
   fileName: string;
   pages: SheetPage[];
 };
-export type SheetPage = { widthMm: number; heightMm: number; items: SheetItem[] };
+export type SheetPage = { title: string; widthMm: number; heightMm: number; items: SheetItem[] };
 
 /** Moves to, lines to, Bezier curves to (two control points, then the end), closes. */
 export type Step =

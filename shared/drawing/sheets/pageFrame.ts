@@ -82,5 +82,5 @@ export function framedPage(
     ...paragraph(wordsLeft, titleTop - barsDepthMm - gap, left + width - gap - wordsLeft, warning, { sizeMm: 2.3 })
       .items,
   ];
-  return { widthMm, heightMm, items: [...frame, ...draw(roomOf(paper))] };
+  return { title, widthMm, heightMm, items: [...frame, ...draw(roomOf(paper))] };
 }

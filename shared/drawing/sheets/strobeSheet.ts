@@ -11,7 +11,7 @@ import { column, words, wordsAround } from "./words";
 export type StrobeSheetInput = { mainsHz: number; speeds: readonly number[]; spindleMm: number; paper: Paper };
 
 /** A disc about a centre: its edge to cut, rings with what each shows, and the hole for the spindle. */
-export function discItems(disc: Disc, cx: number, cy: number): SheetItem[] {
+function discItems(disc: Disc, cx: number, cy: number): SheetItem[] {
   const { radiusMm, spindleMm, mainsHz, rings } = disc;
   const cross = spindleMm / 2 + 3;
   const hairline = { strokeMm: 0.1 };
@@ -82,19 +82,26 @@ function below({ mainsHz, speeds, spindleMm }: StrobeSheetInput, room: Room): Be
 }
 
 /**
- * A stroboscope disc as large as the paper allows, with what its rings really show and how to read them.
+ * The disc of a sheet, as large as the paper allows.
  *
- * Errors: DomainError on "mainsHz" or "speeds", as layOutDisc.
+ * Errors: DomainError on "mainsHz", "spindleMm" or "speeds", as layOutDisc.
  */
-export function strobeSheet(input: StrobeSheetInput): Sheet {
+export function strobeDisc(input: StrobeSheetInput): Disc {
   const { mainsHz, speeds, spindleMm, paper } = input;
   const room = roomOf(paper);
+  const radiusMm = Math.min(room.right - room.left, room.bottom - below(input, room).height - room.top - 2) / 2;
+  return layOutDisc({ mainsHz, speeds, spindleMm, radiusMm });
+}
+
+/** A stroboscope disc with what its rings really show and how to read them. Errors: as strobeDisc. */
+export function strobeSheet(input: StrobeSheetInput): Sheet {
+  const { mainsHz, paper } = input;
+  const disc = strobeDisc(input);
+  const room = roomOf(paper);
   const text = below(input, room);
-  const radiusMm = Math.min(room.right - room.left, room.bottom - text.height - room.top - 2) / 2;
-  const disc = layOutDisc({ mainsHz, speeds, spindleMm, radiusMm });
   const mains = `${shortNumber(mainsHz, 2)} Hz`;
   const page = framedPage(paper, "Stroboscope disc", [{ label: "Lamp on mains of", value: mains }], () => [
-    ...discItems(disc, (room.left + room.right) / 2, room.top + radiusMm),
+    ...discItems(disc, (room.left + room.right) / 2, room.top + disc.radiusMm),
     ...text.draw(room.bottom - text.height),
   ]);
   return { title: `Stroboscope disc, ${mains}`, fileName: `stroboscope-${mainsHz}-hz`, pages: [page] };
