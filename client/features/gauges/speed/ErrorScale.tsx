@@ -21,7 +21,7 @@ export function ErrorScale({ error, medium }: Props) {
       <div ref={place} className="grid gap-3">
         <div>
           <Ruler error={error} range={range} width={width} xOf={xOf} x={x} />
-          <p className="text-small text-soft">Percent above, cents (hundredths of a semitone) below.</p>
+          <p className="text-small text-soft">Percent above, cents below.</p>
         </div>
         <ul className="grid gap-3">
           {limits.map((limit) => (
@@ -30,8 +30,8 @@ export function ErrorScale({ error, medium }: Props) {
         </ul>
       </div>
       <p className="text-small text-soft">
-        Limits of the mean speed, ends included. A limit quoted by somebody else or written from memory is no release
-        from looking it up.
+        Limits of the mean speed, ends included. Look up what is at second hand or from memory before you rely on it. A
+        cent is a hundredth of a semitone.
       </p>
     </section>
   );

@@ -14,9 +14,9 @@ export const isToBeHad = (mm: number | undefined): mm is number => {
   return mm !== undefined && mm >= least && mm <= most;
 };
 
-/** A size to turn on a lathe: to the micrometre, or the ten-thousandth of an inch. */
+/** A diameter to turn on a lathe, to the micrometre or the ten-thousandth of an inch: "ø 6.019". */
 export const turnedSize = (mm: number, unit: SizeUnit): string =>
-  unit === "mm" ? roundDecimal(mm, 3) : roundDecimal(mm / 25.4, 4);
+  `ø\u00a0${unit === "mm" ? roundDecimal(mm, 3) : roundDecimal(mm / 25.4, 4)}`;
 
 /** The motor's step or pulley that would hit the target from this motor. */
 export function FirstSize({ input, result, unit }: Props) {
@@ -35,9 +35,9 @@ export function FirstSize({ input, result, unit }: Props) {
     );
   }
   return (
-    <Readout label={`For just ${wanted}`} value={`ø ${turnedSize(need, unit)}`} unit={unit} look="measured">
+    <Readout label={`For just ${wanted}`} value={turnedSize(need, unit)} unit={unit} look="measured">
       <p>
-        {sizeName(first.field, stages)} to turn for this motor; it has ø {turnedSize(first.mm, unit)} now. Or change one
+        {sizeName(first.field, stages)} to turn for this motor; it has {turnedSize(first.mm, unit)} now. Or change one
         other size: see the table.
       </p>
     </Readout>

@@ -10,12 +10,17 @@ function Line({ line, x, y, colour }: { line: LabelLine; x: number; y: number; c
   const size = labelSize[look];
   const weight = look === "soft" ? 500 : 600;
   const words = { y, fontSize: size, fontWeight: weight, fill: colour };
+  // The words keep to the room that was reckoned for them, whichever font the page ends up with.
+  const room = (text: string) => ({
+    textLength: textWidth(text.trimEnd(), size, weight),
+    lengthAdjust: "spacingAndGlyphs",
+  });
   const afterName = x + textWidth(name, size, weight);
   const struck = look === "struck" ? `M${x - 2} ${y - size * 0.3}H${x + lineWidth(line) + 2}` : undefined;
   return (
     <>
-      <text x={x} {...words}>
-        {name}
+      <text x={x} {...words} {...room(name)}>
+        {name.trimEnd()}
       </text>
       {number !== undefined && (
         <>
@@ -26,7 +31,7 @@ function Line({ line, x, y, colour }: { line: LabelLine; x: number; y: number; c
             stroke={colour}
             strokeWidth={size * 0.085}
           />
-          <text x={afterName + signWidthEm * size} {...words}>
+          <text x={afterName + signWidthEm * size} {...words} {...room(number)}>
             {number}
           </text>
         </>

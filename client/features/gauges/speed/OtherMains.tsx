@@ -34,15 +34,10 @@ export function OtherMains({ input, result, unit }: Props) {
   const name = sizeName(result.sizes[0]!.field, stages);
   const needed = neededThere(input, mainsHz);
   return (
-    <Readout
-      label={`On ${mainsHz} Hz mains`}
-      value={`ø ${turnedSize(stepDiameterMm, unit)}`}
-      unit={unit}
-      look="measured"
-    >
+    <Readout label={`On ${mainsHz} Hz mains`} value={turnedSize(stepDiameterMm, unit)} unit={unit} look="measured">
       <p>
         {name} that keeps today’s speed there
-        {isToBeHad(needed) && `; ø ${turnedSize(needed, unit)} would hit the target there`}.
+        {isToBeHad(needed) && `; ${turnedSize(needed, unit)} would hit the target there`}.
       </p>
       <p>
         Left as it is, it would run at {rpmText(there)} {isTape ? "mm/s" : "rpm"}.{" "}

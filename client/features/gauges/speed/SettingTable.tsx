@@ -30,12 +30,12 @@ export function SettingTable({ input, result, unit }: Props) {
               <tr key={field} className="border-b border-rule">
                 <th className="py-1.5 pr-3 font-semibold text-measured">{sizeName(field, stages)}</th>
                 <td className="py-1.5 pr-3 text-right">
-                  {isThickness(field) ? "" : "ø "}
+                  {isThickness(field) ? "" : "ø\u00a0"}
                   {sizeNumber(mm, unit)}
                 </td>
                 <td className="py-1.5 pr-3 text-right">{signed(percentPerHundredthMm * step, 3)} %</td>
                 {result.target && (
-                  <td className="py-1.5 text-right">{isToBeHad(neededMm) ? `ø ${turnedSize(neededMm, unit)}` : "–"}</td>
+                  <td className="py-1.5 text-right">{isToBeHad(neededMm) ? turnedSize(neededMm, unit) : "–"}</td>
                 )}
               </tr>
             ))}

@@ -1,9 +1,11 @@
 import { LabelLines } from "./LabelLines";
 import type { Train } from "./layoutTrain";
 import { TrainShapes } from "./TrainShapes";
-import type { Detail } from "./trainDetails";
+import { type Detail, letterOf } from "./trainDetails";
 import { toPx } from "./trainView";
 
+/** A letter can be read on rubber as well. */
+const halo = { paintOrder: "stroke", stroke: "var(--color-sheet)", strokeWidth: 4, strokeLinejoin: "round" } as const;
 const thin = { stroke: "var(--color-ink)", strokeWidth: 0.9, fill: "none" };
 
 /** A small wheel again in a round window, larger: its letter and by how much stand with it. */
@@ -21,6 +23,7 @@ export function TrainDetail({
   const { letter, times, view, centre, radius, mark, wheel, label, words } = detail;
   const at = toPx(view, wheel);
   const r = wheel.r * view.pxPerMm;
+  const beside = letterOf(mark);
   const clip = `${id}-${letter}`;
   return (
     <g>
@@ -37,7 +40,15 @@ export function TrainDetail({
       </g>
       <circle cx={centre.x} cy={centre.y} r={radius} {...thin} />
       <circle cx={mark.x} cy={mark.y} r={mark.r} {...thin} />
-      <text x={mark.x + mark.r + 1} y={mark.y - mark.r + 3} fontSize={14} fontWeight={600} fill="var(--color-ink)">
+      <text
+        {...halo}
+        x={beside.x}
+        y={beside.y + 5}
+        textAnchor="middle"
+        fontSize={14}
+        fontWeight={600}
+        fill="var(--color-ink)"
+      >
         {letter}
       </text>
       <text x={words.x} y={words.y} fontSize={12} fontWeight={500} fill="var(--color-soft)" textAnchor={words.anchor}>

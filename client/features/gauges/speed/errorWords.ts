@@ -38,5 +38,5 @@ export function errorSentence(errorPercent: number, errorCents: number): string 
   if (errorPercent > 1000) return "More than ten times too fast.";
   const way = errorPercent > 0 ? "fast" : "slow";
   const figure = roundDecimal(size, size >= 1 ? 1 : 2);
-  return `${figure} % ${way}: ${semitoneWords(errorCents)} ${errorCents > 0 ? "sharp" : "flat"}.`;
+  return `${figure}\u00a0% ${way}: ${semitoneWords(errorCents)} ${errorCents > 0 ? "sharp" : "flat"}.`;
 }

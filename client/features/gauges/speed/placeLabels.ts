@@ -14,7 +14,7 @@ export type LabelRequest = {
 export type PlacedLabel = { key: string; box: Box; leader: readonly [tip: Point, knee: Point, end: Point] };
 
 const lengths = [14, 24, 38, 56, 80, 110, 150];
-const directions = Array.from({ length: 32 }, (_, i) => (i / 32) * 2 * Math.PI);
+const directions = Array.from({ length: 24 }, (_, i) => (i / 24) * 2 * Math.PI);
 const shoulder = 8;
 const gap = 4;
 
@@ -60,29 +60,55 @@ const inflated = ({ left, top, width, height }: Box): Box => ({
   height: height + 8,
 });
 
-function candidates({ key, at, width, height }: LabelRequest): { placed: PlacedLabel; cost: number }[] {
-  return directions.flatMap((angle) =>
-    lengths.flatMap((length) =>
-      // Inwards only where there is room for words inside.
-      (at.r > width * 0.7 ? [1, -1] : [1]).map((sense) => {
-        const [ux, uy] = [Math.cos(angle), Math.sin(angle)];
-        const tip = { x: at.x + ux * at.r, y: at.y + uy * at.r };
-        const knee = { x: tip.x + sense * ux * length, y: tip.y + sense * uy * length };
-        const toRight = sense * ux >= 0;
-        const end = { x: knee.x + (toRight ? shoulder : -shoulder), y: knee.y };
-        const left = toRight ? end.x + gap : end.x - gap - width;
-        const box = { left, top: knee.y - 9, width, height };
-        // Leaders that run nearly level or upright read as edges of the drawing.
-        const isOblique = Math.abs(ux) > 0.2 && Math.abs(uy) > 0.2;
-        return { placed: { key, box, leader: [tip, knee, end] as const }, cost: length * 0.3 + (isOblique ? 0 : 6) };
-      }),
-    ),
+const pointBox = ({ x, y }: Point): Box => ({ left: x, top: y, width: 0, height: 0 });
+
+type Candidate = { placed: PlacedLabel; cost: number };
+
+/** A label at the end of a leader that leaves its circle at an angle; inwards where `sense` is -1. */
+function candidate(
+  { key, at, width, height }: LabelRequest,
+  angle: number,
+  length: number,
+  sense: number,
+  side: number,
+): Candidate {
+  const [ux, uy] = [Math.cos(angle), Math.sin(angle)];
+  const tip = { x: at.x + ux * at.r, y: at.y + uy * at.r };
+  const knee = { x: tip.x + sense * ux * length, y: tip.y + sense * uy * length };
+  const end = { x: knee.x + side * shoulder, y: knee.y };
+  const left = side > 0 ? end.x + gap : end.x - gap - width;
+  const box = { left, top: knee.y - 9, width, height };
+  // Leaders that run nearly level or upright read as edges of the drawing; one that turns back at its knee is no beauty.
+  const isOblique = Math.abs(ux) > 0.2 && Math.abs(uy) > 0.2;
+  const turnsBack = side * sense * ux < -0.01;
+  const cost = length * 0.3 + (isOblique ? 0 : 6) + (turnsBack ? 15 : 0);
+  return { placed: { key, box, leader: [tip, knee, end] }, cost };
+}
+
+function candidates(request: LabelRequest): Candidate[] {
+  // Inwards only where there is room for words inside.
+  const senses = request.at.r > request.width * 0.7 ? [1, -1] : [1];
+  return senses.flatMap((sense) =>
+    directions.flatMap((angle) => {
+      const lean = sense * Math.cos(angle);
+      const sides = Math.abs(lean) < 0.75 ? [1, -1] : [Math.sign(lean)];
+      return lengths.flatMap((length) => sides.map((side) => candidate(request, angle, length, sense, side)));
+    }),
   );
+}
+
+/** Orders in which few labels are tried, since the first ones take the best places; for many, one must do. */
+function ordersOf(count: number): number[][] {
+  const order = Array.from({ length: count }, (_, i) => i);
+  if (count > 6) return [order];
+  const turned = order.map((by) => order.map((i) => (i + by) % count));
+  return [...turned, ...turned.map((one) => [...one].reverse())];
 }
 
 /**
  * Words beside what they name, each at the end of a leader, where they cover least: neither each other nor edges.
- * The first placed have the best places, then each is looked at again with the others in place.
+ * Each takes its best place in turn, and is then looked at again with the others in place; of several turns the one that
+ * costs least as a whole is taken.
  */
 export function placeLabels(
   requests: readonly LabelRequest[],
@@ -101,7 +127,7 @@ export function placeLabels(
       (cost, circle) => {
         const [nearest, farthest] = reachOf(box, circle);
         if (nearest - 3 >= circle.r) return cost;
-        return cost + (farthest + 3 > circle.r ? 80 : 0) + circle.cost;
+        return cost + (farthest + 3 > circle.r ? 220 : 0) + circle.cost;
       },
       lines.reduce((sum, { line, cost }) => sum + (crossesBox(line, inflated(box)) ? cost : 0), 0),
     );
@@ -111,7 +137,7 @@ export function placeLabels(
       const [line, otherLine] = [leader, other.leader].map(([tip, knee]) => [tip, knee] as const);
       return (
         cost +
-        (overlap(box, other.box, 6) ? 600 : 0) +
+        (overlap(box, other.box, 6) ? 3000 : 0) +
         (crossesBox(line!, other.box) ? 200 : 0) +
         (crossesBox(otherLine!, box) ? 200 : 0) +
         (cross(line!, otherLine!) ? 120 : 0)
@@ -120,29 +146,30 @@ export function placeLabels(
 
   const ways = requests.map((request) =>
     candidates(request).map(({ placed, cost }) => {
-      const out = outside(placed.box);
-      return { placed, cost: cost + covers(placed.box) + (out > 0 ? 800 + out * 10 : 0) };
+      const [, knee, end] = placed.leader;
+      const out = [placed.box, pointBox(knee), pointBox(end)].reduce((sum, part) => sum + outside(part), 0);
+      return { placed, cost: cost + covers(placed.box) + (out > 0 ? 2000 + out * 10 : 0) };
     }),
   );
-  const best = (index: number, others: readonly PlacedLabel[]) =>
-    ways[index]!.reduce(
-      (least, { placed, cost }) => {
-        if (cost >= least.cost) return least;
-        const whole = cost + clashes(placed, others);
-        return whole < least.cost ? { placed, cost: whole } : least;
-      },
-      { placed: ways[index]![0]!.placed, cost: Infinity },
-    ).placed;
-
-  const placed: PlacedLabel[] = [];
-  for (const index of requests.keys()) placed.push(best(index, placed));
-  for (let round = 0; round < 2; round++) {
-    for (const index of requests.keys()) {
-      placed[index] = best(
-        index,
-        placed.filter((_, other) => other !== index),
-      );
+  const best = (index: number, others: readonly PlacedLabel[]) => {
+    let least: Candidate = { placed: ways[index]![0]!.placed, cost: Infinity };
+    for (const { placed, cost } of ways[index]!) {
+      if (cost >= least.cost) continue;
+      const whole = cost + clashes(placed, others);
+      if (whole < least.cost) least = { placed, cost: whole };
     }
-  }
-  return placed;
+    return least;
+  };
+  const inTurn = (order: readonly number[]) => {
+    const places = new Map<number, Candidate>();
+    const othersOf = (index: number) => [...places].flatMap(([other, { placed }]) => (other === index ? [] : [placed]));
+    for (const index of order) places.set(index, best(index, othersOf(index)));
+    for (let round = 0; round < 2; round++) {
+      for (const index of order) places.set(index, best(index, othersOf(index)));
+    }
+    const cost = [...places.values()].reduce((sum, place) => sum + place.cost, 0);
+    return { placed: requests.map((_, index) => places.get(index)!.placed), cost };
+  };
+  const tries = ordersOf(requests.length).map(inTurn);
+  return tries.reduce((least, one) => (one.cost < least.cost ? one : least)).placed;
 }

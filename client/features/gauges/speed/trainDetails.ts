@@ -18,6 +18,9 @@ export type Detail = {
   words: Point & { anchor: "start" | "middle" };
 };
 
+/** The middle of the letter beside a mark, above and right of it. */
+export const letterOf = ({ x, y, r }: Detail["mark"]): Point => ({ x: x + r + 6, y: y - r - 2 });
+
 /** A wheel smaller than this in the plan, px of radius, is shown again in a detail, about as large as wanted. */
 const leastRadius = 15;
 const wantedRadius = 32;

@@ -36,7 +36,9 @@ describe("an error in words", () => {
     [20, 315.64, "20.0 % fast: about 3 semitones sharp."],
     [-50, -1200, "50.0 % slow: about an octave flat."],
     [1e40, 1e5, "More than ten times too fast."],
-  ])("%d percent, %d cents", (percent, cents, words) => expect(errorSentence(percent, cents)).toBe(words));
+  ])("%d percent, %d cents", (percent, cents, words) =>
+    expect(errorSentence(percent, cents).replace("\u00a0", " ")).toBe(words),
+  );
 
   it("counts half semitones", () => {
     expect(semitoneWords(149)).toBe("about 1½ semitones");
