@@ -1,5 +1,6 @@
 import { Link } from "react-router-dom";
 import { assumedClass } from "#shared/domain/partTolerance";
+import { CheckInBar } from "./CheckInBar";
 import { FitBench } from "./FitBench";
 import { ChanceFormula, CombinedFormula } from "./Formula";
 import { GuideSection } from "./GuideSection";
@@ -63,6 +64,7 @@ export function FitChanceGuide() {
             explains, and does not where it lies as far outside. In between it cannot be told with this instrument, and
             nobody is blamed for that.
           </p>
+          <CheckInBar />
           <p>
             <Link to="/guides/limits">What cannot be known</Link>
           </p>

@@ -1,6 +1,7 @@
 import { fireEvent, screen, within } from "@testing-library/react";
 import { describe, expect, it, vi } from "vitest";
 import { defaultBand } from "#shared/domain/acceptedBands";
+import { checkIn } from "#shared/domain/checkIn";
 import { dimensionsOf, kindFacts, partKinds } from "#shared/domain/partKinds";
 import { ageRows } from "../../../client/features/guides/ageRows";
 import { changeWords } from "../../../client/features/guides/changeWords";
@@ -95,6 +96,20 @@ describe("figures that come from the domain", () => {
         `${lowerMm.toFixed(decimals(lowerMm))} to ${upperMm.toFixed(decimals(upperMm))}`,
       );
     }
+  });
+});
+
+describe("what is said of a part that arrives", () => {
+  it("has the guard band that the check-in uses", async () => {
+    const part = { nominalMm: 44.4, plusMinusMm: 0.15 };
+    const { guardBandMm } = checkIn({ ...part, readingsMm: [44.4], instrument: "digital-caliper" });
+    await open("fit-chance");
+    const zone = (mm: number) => (44.4 + mm).toFixed(2);
+    expect(
+      screen.getByRole("img", {
+        name: `Conforms from ${zone(guardBandMm - 0.15)} to ${zone(0.15 - guardBandMm)} mm, does not below ${zone(-0.15 - guardBandMm)} or above ${zone(0.15 + guardBandMm)} mm`,
+      }),
+    ).toBeInTheDocument();
   });
 });
 
