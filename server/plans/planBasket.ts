@@ -15,11 +15,9 @@ let thread: Worker | undefined;
 let count = 0;
 
 function startThread(): Worker {
-  // Bundled, this is part of server/main.js with the thread's program beside it; from source it is TypeScript.
-  const isSource = import.meta.url.endsWith(".ts");
-  const started = new Worker(new URL(isSource ? "./planWorker.ts" : "./planWorker.js", import.meta.url), {
-    execArgv: isSource ? ["--import", "tsx"] : [],
-  });
+  // Bundled, this is part of server/main.js with the thread's program beside it.
+  const program = import.meta.url.endsWith(".ts") ? "./planWorkerFromSource.mjs" : "./planWorker.js";
+  const started = new Worker(new URL(program, import.meta.url));
   started.on("message", (word: PlanWord) => {
     const who = waiting.get(word.id);
     waiting.delete(word.id);

@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { longestLengthMm } from "../../domain/length";
 import { ToleranceClass } from "../part";
-import { described, Figure, numberText, signedMm } from "./numbers";
+import { Figure, numberText, signedMm } from "./numbers";
 
 export const RubberToleranceRequest = z.object({
   class: ToleranceClass,
@@ -22,7 +22,10 @@ export const RubberToleranceAnswer = z.object({
 
 export const ConformanceRequest = z.object({
   estimateMm: signedMm,
-  standardUncertaintyMm: described({ minimum: 0, maximum: longestLengthMm }),
+  standardUncertaintyMm: z
+    .number()
+    .min(0, "An uncertainty is zero or more.")
+    .max(longestLengthMm, "An uncertainty is at most 10 m."),
   lowerMm: signedMm.optional(),
   upperMm: signedMm.optional(),
 });
