@@ -16,9 +16,9 @@ export function ErrorScale({ error, medium }: Props) {
   const xOf = (percent: number) => width / 2 + (percent / range) * (width / 2 - 22);
   const x = Math.min(Math.max(xOf(error.errorPercent), 5), width - 5);
   return (
-    <section className="grid gap-3">
+    <section className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-3">
       <RuledHeading>Error and published limits</RuledHeading>
-      <div ref={place} className="grid gap-3">
+      <div ref={place} className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-3">
         <div>
           <Ruler error={error} range={range} width={width} xOf={xOf} x={x} />
           <p className="text-small text-soft">Percent above, cents below.</p>
@@ -43,7 +43,14 @@ function Ruler({ error, range, width, xOf, x }: Placed & { range: number }) {
   const words = `${signed(error.errorPercent)} %, ${signed(error.errorCents, 1)} cents`;
   const [percentY, centsY] = [30, 52];
   return (
-    <svg width={width} height={84} viewBox={`0 0 ${width} 84`} role="img" aria-label={words} className="block">
+    <svg
+      width={width}
+      height={84}
+      viewBox={`0 0 ${width} 84`}
+      role="img"
+      aria-label={words}
+      className="block max-w-full"
+    >
       <path d={`M0 ${percentY}H${width}M0 ${centsY}H${width}`} stroke="var(--color-ink)" />
       {axisMarks({ fromMm: -range, toMm: range }, width - 44, "mm", 48)
         .filter(({ mm }) => mm >= -100)
@@ -85,7 +92,7 @@ function LimitRow({ limit, error, width, xOf, x }: Placed & { limit: SpeedLimit 
   const [from, to] = [xOf(lowerPercent), xOf(upperPercent)];
   return (
     <li className="grid gap-1">
-      <svg width={width} height={18} viewBox={`0 0 ${width} 18`} aria-hidden="true" className="block">
+      <svg width={width} height={18} viewBox={`0 0 ${width} 18`} aria-hidden="true" className="block max-w-full">
         <path d={`M0 9H${width}`} stroke="var(--color-rule)" />
         <rect
           x={from}

@@ -47,7 +47,7 @@ export function SpeedPage() {
         </>
       }
       side={
-        <div inert={isStale} className={`grid gap-7 ${isStale ? "opacity-40" : ""}`}>
+        <div inert={isStale} className={`grid grid-cols-[minmax(0,1fr)] gap-7 ${isStale ? "opacity-40" : ""}`}>
           <SpeedResults input={shown.input} result={shown.result} unit={unit} />
         </div>
       }

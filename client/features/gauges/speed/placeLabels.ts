@@ -34,13 +34,19 @@ function reachOf({ left, top, width, height }: Box, { x, y }: Point): [nearest: 
   return [Math.hypot(dx, dy), Math.hypot(fx, fy)];
 }
 
+/** On which side of the line from p to q a point lies. */
+const side = (p: Point, q: Point, r: Point) => Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x));
+
 function cross([a, b]: readonly [Point, Point], [c, d]: readonly [Point, Point]): boolean {
-  const side = (p: Point, q: Point, r: Point) => Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x));
   return side(a, b, c) !== side(a, b, d) && side(c, d, a) !== side(c, d, b);
 }
 
 function crossesBox(line: readonly [Point, Point], { left, top, width, height }: Box): boolean {
   const [right, bottom] = [left + width, top + height];
+  // Most lines are nowhere near, and this is asked a hundred thousand times.
+  const [from, to] = line;
+  if (Math.max(from.x, to.x) < left || Math.min(from.x, to.x) > right) return false;
+  if (Math.max(from.y, to.y) < top || Math.min(from.y, to.y) > bottom) return false;
   const isInside = (p: Point) => p.x > left && p.x < right && p.y > top && p.y < bottom;
   const falling = [
     { x: left, y: top },
@@ -122,27 +128,25 @@ export function placeLabels(
     Math.max(0, left + width - region.left - region.width) +
     Math.max(0, top + height - region.top - region.height);
 
-  const covers = (box: Box) =>
-    obstacles.reduce(
-      (cost, circle) => {
-        const [nearest, farthest] = reachOf(box, circle);
-        if (nearest - 3 >= circle.r) return cost;
-        return cost + (farthest + 3 > circle.r ? 220 : 0) + circle.cost;
-      },
-      lines.reduce((sum, { line, cost }) => sum + (crossesBox(line, inflated(box)) ? cost : 0), 0),
-    );
-
-  const clashes = ({ box, leader }: PlacedLabel, others: readonly PlacedLabel[]) =>
-    others.reduce((cost, other) => {
-      const [line, otherLine] = [leader, other.leader].map(([tip, knee]) => [tip, knee] as const);
-      return (
-        cost +
-        (overlap(box, other.box, 6) ? 3000 : 0) +
-        (crossesBox(line!, other.box) ? 200 : 0) +
-        (crossesBox(otherLine!, box) ? 200 : 0) +
-        (cross(line!, otherLine!) ? 120 : 0)
-      );
+  const covers = (box: Box) => {
+    const room = inflated(box);
+    const edges = obstacles.reduce((sum, circle) => {
+      const [nearest, farthest] = reachOf(box, circle);
+      if (nearest - 3 >= circle.r) return sum;
+      return sum + (farthest + 3 > circle.r ? 220 : 0) + circle.cost;
     }, 0);
+    return lines.reduce((sum, { line, cost }) => sum + (crossesBox(line, room) ? cost : 0), edges);
+  };
+
+  const clashes = ({ box, leader }: PlacedLabel, others: readonly PlacedLabel[]) => {
+    const line = [leader[0], leader[1]] as const;
+    return others.reduce((sum, other) => {
+      const otherLine = [other.leader[0], other.leader[1]] as const;
+      const words = overlap(box, other.box, 6) ? 3000 : 0;
+      const through = (crossesBox(line, other.box) ? 200 : 0) + (crossesBox(otherLine, box) ? 200 : 0);
+      return sum + words + through + (cross(line, otherLine) ? 120 : 0);
+    }, 0);
+  };
 
   const ways = requests.map((request) =>
     candidates(request).map(({ placed, cost }) => {
