@@ -5,6 +5,8 @@ import type { Contact } from "./beltTangents";
 type Point = { x: number; y: number };
 /** The least wrap of an inside pulley that drives or is driven, in degrees. Common practice, no source. */
 const drivingWrap = 90;
+/** The least wrap of any pulley, in degrees, that can drive something at all. Common practice, no source. */
+const guidingWrap = 30;
 /** A wrap, in degrees, that a slightly longer belt no longer has. Common practice, no source. */
 const bareTouch = 5;
 /**
@@ -36,7 +38,7 @@ function wrapWords(pulley: Pulley, number: number, wrap: number, thickness: numb
   const shown = `${wrap.toFixed(wrap < 10 ? 1 : 0)}°`;
   if (wrap < bareTouch)
     words.push(`Pulley ${number} has only ${shown} of wrap: a little slack and the belt leaves it.`);
-  else if (pulley.wrap === "inside" && wrap < drivingWrap - 1e-6)
+  else if (wrap < (pulley.wrap === "inside" ? drivingWrap - 1e-6 : guidingWrap))
     words.push(
       `Pulley ${number} has only ${shown} of wrap: enough to guide the belt, little to drive with (common practice, no source: ${drivingWrap}°).`,
     );

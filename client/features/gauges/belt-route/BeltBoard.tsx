@@ -1,26 +1,22 @@
 import { type KeyboardEvent, useCallback, useRef } from "react";
-import type { BeltRoute } from "#shared/domain/beltRoute";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { Button } from "../../../ui/Button";
 import { useOwnWidth } from "../../../ui/drawing/useOwnWidth";
+import { useLastGood } from "../useLastGood";
 import { BoardDrawing } from "./BoardDrawing";
-import { type NamedPulley, pulleyName } from "./beltState";
+import { type BeltState, type NamedPulley, pulleyName } from "./beltState";
 import { toPx } from "./boardView";
 import { keyStep } from "./keyStep";
 import { PulleyHandle } from "./PulleyHandle";
 import { RefusalNote } from "./RefusalNote";
 import { RimHandle } from "./RimHandle";
-import type { Refusal } from "./solveState";
+import { type Solved, solveState } from "./solveState";
 import { useBoardView } from "./useBoardView";
 import { usePulleyDrag } from "./usePulleyDrag";
 
 type Props = {
-  pulleys: readonly NamedPulley[];
-  /** The route, or the last one that closed. */
-  route: BeltRoute | null;
-  isStale: boolean;
-  refusal: Refusal | null;
-  thickness: number;
+  state: BeltState;
+  solved: Solved;
   unit: SizeUnit;
   /** Another one is another machine, which is shown whole. */
   drawn: string;
@@ -38,7 +34,7 @@ const arrows: Record<string, readonly [number, number]> = {
 
 /** The drawing with what its pulleys are dragged by; each is reached by Tab and moved with the arrow keys. */
 export function BeltBoard(props: Props) {
-  const { pulleys, route, isStale, refusal, thickness, unit, drawn, selectedId, onSelect, onChange } = props;
+  const { state, unit, drawn, selectedId, onSelect, onChange } = props;
   const [place, width] = useOwnWidth(760);
   const board = { width, height: Math.round(Math.min(Math.max(width * 0.66, 320), 560)) };
   const latest = useRef(props);
@@ -48,13 +44,17 @@ export function BeltBoard(props: Props) {
     (id: number, change: Partial<NamedPulley>) => latest.current.onChange(id, change, false),
     [],
   );
-  const { isHeld, hold, holdRim, handlers } = usePulleyDrag(pulleys, scale, onDrag);
-  const { view, closer, wider, fit } = useBoardView(pulleys, thickness, board, drawn, isHeld);
+  const { draft, hold, holdRim, handlers } = usePulleyDrag(state.pulleys, scale, onDrag);
+  const pulleys = draft ?? state.pulleys;
+  const { route, thicknessMm, refusal } = draft ? solveState({ ...state, pulleys }, unit) : props.solved;
+  const { good } = useLastGood(route && thicknessMm !== null ? { route, thicknessMm } : null);
+  const thickness = thicknessMm ?? good?.thicknessMm ?? 1;
+  const { view, closer, wider, fit } = useBoardView(pulleys, thickness, board, drawn, draft !== null);
   scale.current = view.scale;
 
   const onKey = useCallback((event: KeyboardEvent, id: number) => {
     const way = arrows[event.key];
-    const pulley = latest.current.pulleys.find((one) => one.id === id);
+    const pulley = latest.current.state.pulleys.find((one) => one.id === id);
     if (!way || !pulley) return;
     event.preventDefault();
     const step = keyStep(event);
@@ -71,14 +71,15 @@ export function BeltBoard(props: Props) {
         ref={place}
         role="application"
         aria-label="Board. Arrow keys move a pulley by 1 mm, with Shift by 10 mm, with Alt by 0.1 mm."
-        className="gauge-sheet relative mt-2 overflow-hidden"
+        className="belt-board gauge-sheet relative mt-2 overflow-hidden"
         {...handlers}
       >
         <BoardDrawing
           pulleys={pulleys}
-          route={route}
-          isStale={isStale}
+          route={route ?? good?.route ?? null}
+          isStale={!route}
           refusedIndex={refusal?.pulley ?? null}
+          selectedId={selectedId}
           thickness={thickness}
           unit={unit}
           view={view}

@@ -29,7 +29,7 @@ export function BeltFields({ state, unit, errors, onChange }: Props) {
   const [label, hint] = thicknessWords[kind];
   const setKind = (next: BeltKind) => onChange({ kind: next, ...stretchOf(choicesFor(next)[0]!) });
   return (
-    <section className="grid gap-4">
+    <section className="grid gap-4 print:hidden">
       <RuledHeading>The belt</RuledHeading>
       <SelectField name="kind" label="Kind" value={kind} onChange={(event) => setKind(event.target.value as BeltKind)}>
         {beltKinds.map((one) => (

@@ -1,5 +1,5 @@
 import { roundDecimal } from "#shared/domain/roundDecimal";
-import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
+import { roundedSize, type SizeUnit, sizeNumber } from "../../../lib/formatSize";
 import { LinkButton } from "../../../ui/LinkButton";
 import { RuledHeading } from "../../../ui/RuledHeading";
 import { Readout } from "../Readout";
@@ -26,7 +26,7 @@ export function BeltResults({ state, solved, unit }: Props) {
       <Readout label="Length in place" value={route && beltLength(route.pitchLengthMm, unit)} unit={unit}>
         {thicknessMm !== null && (
           <p>
-            along the middle of a {roundedSize(thicknessMm, unit)} {unit} belt
+            along the middle of a {sizeNumber(thicknessMm, unit)} {unit} belt
           </p>
         )}
       </Readout>

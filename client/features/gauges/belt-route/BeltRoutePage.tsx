@@ -5,7 +5,6 @@ import { Button } from "../../../ui/Button";
 import { RuledHeading } from "../../../ui/RuledHeading";
 import { GaugePage } from "../GaugePage";
 import { useGaugeState } from "../useGaugeState";
-import { useLastGood } from "../useLastGood";
 import { BeltBoard } from "./BeltBoard";
 import { BeltFields } from "./BeltFields";
 import { BeltResults } from "./BeltResults";
@@ -27,8 +26,7 @@ export function BeltRoutePage() {
   const [selectedId, setSelected] = useState<number | null>(null);
   const [exampleCount, setExampleCount] = useState(0);
   const solved = useMemo(() => solveState(state, unit), [state, unit]);
-  const { route, thicknessMm, refusal } = solved;
-  const { good } = useLastGood(route && thicknessMm !== null ? { route, thicknessMm } : null);
+  const { route, refusal } = solved;
 
   const movedByKey = useRef<number | null>(null);
   useEffect(() => {
@@ -62,11 +60,8 @@ export function BeltRoutePage() {
         <>
           <RuledHeading>Board, millimetres</RuledHeading>
           <BeltBoard
-            pulleys={state.pulleys}
-            route={route ?? good?.route ?? null}
-            isStale={!route}
-            refusal={refusal}
-            thickness={thicknessMm ?? good?.thicknessMm ?? 1}
+            state={state}
+            solved={solved}
             unit={unit}
             drawn={String(exampleCount)}
             selectedId={selectedId}

@@ -4,10 +4,12 @@ import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { Hatches } from "../Hatches";
 import { BeltLine } from "./BeltLine";
 import { BoardGrid } from "./BoardGrid";
+import { BoardLabel } from "./BoardLabel";
 import type { NamedPulley } from "./beltState";
 import { type BoardLabels, boardLabels, hasOwnNumber, nameWords, noLabels } from "./boardLabels";
 import { type Board, toPx, type View } from "./boardView";
 import { PulleyMark } from "./PulleyMark";
+import { rimHandleBox } from "./rimHandleBox";
 
 type Props = {
   pulleys: readonly NamedPulley[];
@@ -15,6 +17,8 @@ type Props = {
   route: BeltRoute | null;
   isStale: boolean;
   refusedIndex: number | null;
+  /** Its handle keeps words away. */
+  selectedId: number | null;
   thickness: number;
   unit: SizeUnit;
   view: View;
@@ -28,11 +32,23 @@ function freeSideOf({ contacts }: BeltRoute, i: number): number {
 }
 
 /** The machine from above, to scale, with its belt, names and lengths. */
-export function BoardDrawing({ pulleys, route, isStale, refusedIndex, thickness, unit, view, board }: Props) {
+export function BoardDrawing({
+  pulleys,
+  route,
+  isStale,
+  refusedIndex,
+  selectedId,
+  thickness,
+  unit,
+  view,
+  board,
+}: Props) {
   const live = isStale ? null : route;
   const spanWords = live ? live.spansMm.map((mm) => (unit === "mm" ? mm.toFixed(1) : roundedSize(mm, unit))) : [];
+  const chosen = pulleys.find(({ id }) => id === selectedId);
+  const taken = chosen ? [rimHandleBox(toPx(view, chosen), (chosen.diameter / 2) * view.scale)] : [];
   const before = useRef<BoardLabels>(noLabels);
-  const labels = boardLabels(pulleys, live, thickness, spanWords, view, board, before.current);
+  const labels = boardLabels(pulleys, live, thickness, spanWords, view, board, before.current, taken);
   before.current = labels;
   const indexOf = new Map(pulleys.map(({ id }, i) => [id, i]));
   return (
@@ -59,21 +75,19 @@ export function BoardDrawing({ pulleys, route, isStale, refusedIndex, thickness,
         />
       ))}
       {route && <BeltLine route={route} thickness={thickness} view={view} isStale={isStale} />}
+      {live && (
+        <text x={board.width - 10} y={21} textAnchor="end" fontSize={15} fontWeight={700} fill="var(--color-ink)">
+          {unit === "mm" ? live.pitchLengthMm.toFixed(1) : roundedSize(live.pitchLengthMm, unit)} {unit} in place
+        </text>
+      )}
       <g fontSize={13} textAnchor="middle">
         {labels.spans.map(({ id, x, y }) => (
-          <text key={id} x={x} y={y + 4.5} fill="var(--color-soft)">
-            {spanWords[indexOf.get(id) ?? 0]}
-          </text>
+          <BoardLabel key={id} x={x} y={y} soft={spanWords[indexOf.get(id) ?? 0] ?? ""} />
         ))}
         {labels.names.map(({ id, x, y }) => {
           const i = indexOf.get(id) ?? 0;
-          const { name, wrap } = nameWords(pulleys[i]!, i, live?.wrapsDeg[i], view);
-          return (
-            <text key={id} x={x} y={y + 4.5} fill="var(--color-ink)">
-              <tspan fontWeight={650}>{name}</tspan>
-              <tspan fill="var(--color-soft)">{wrap && ` ${wrap}`}</tspan>
-            </text>
-          );
+          const { name, wrap } = nameWords(pulleys[i]!, i, live?.wrapsDeg[i], view, board);
+          return <BoardLabel key={id} x={x} y={y} strong={name} soft={wrap} />;
         })}
       </g>
     </svg>

@@ -1,4 +1,5 @@
 import { memo } from "react";
+import { hasInnerArrow } from "./boardLabels";
 import { turnArrow } from "./turnArrow";
 
 type Props = {
@@ -21,7 +22,8 @@ const badge = 11;
 export const PulleyMark = memo(function PulleyMark(props: Props) {
   const { number, x, y, radius, freeSide, turn, beltPx, hasNumber, isRefused } = props;
   const arm = radius + 9;
-  const arrow = radius >= 26 ? Math.max(badge + 6, radius * 0.62) : radius + beltPx + 6;
+  const isInner = hasInnerArrow(radius);
+  const arrow = isInner ? Math.max(badge + 6, radius * 0.62) : radius + beltPx + 6;
   return (
     <g transform={`translate(${x} ${y})`}>
       <circle
@@ -39,7 +41,7 @@ export const PulleyMark = memo(function PulleyMark(props: Props) {
       />
       {freeSide !== null && (
         <path
-          d={turnArrow(arrow, freeSide, radius >= 26 ? 80 : 70, turn)}
+          d={turnArrow(arrow, freeSide, isInner ? 80 : 70, turn)}
           fill="none"
           stroke="var(--color-ink)"
           strokeWidth={1.6}

@@ -51,12 +51,12 @@ export const PulleyRow = memo(function PulleyRow(props: Props) {
     >
       <span className="belt-number">{index + 1}</span>
       <div className="belt-cell belt-name">
-        <label htmlFor={`name-${id}`}>
-          <span aria-hidden="true">pulley</span>
-          <span className="sr-only">Name of pulley {index + 1}</span>
-        </label>
+        <span className="belt-label" aria-hidden="true">
+          pulley
+        </span>
         <input
-          id={`name-${id}`}
+          aria-label={`Name of pulley ${index + 1}`}
+          name={`pulley-${id}`}
           className="input font-semibold"
           value={name}
           placeholder={`Pulley ${index + 1}`}
@@ -69,12 +69,12 @@ export const PulleyRow = memo(function PulleyRow(props: Props) {
       {size("y", "y", "y")}
       {size("diameter", "ø", "Diameter")}
       <div className="belt-cell belt-side">
-        <label htmlFor={`side-${id}`}>
-          <span aria-hidden="true">belt touches with</span>
-          <span className="sr-only">Side of the belt on {called}</span>
-        </label>
+        <span className="belt-label" aria-hidden="true">
+          side
+        </span>
         <select
-          id={`side-${id}`}
+          aria-label={`Side of the belt on ${called}`}
+          name={`side-${id}`}
           className="input"
           value={wrap}
           onChange={(event) => onChange(id, { wrap: event.target.value as BeltWrap })}
@@ -97,7 +97,7 @@ export const PulleyRow = memo(function PulleyRow(props: Props) {
         {wrap === "inside" ? "same" : "opposite"}
       </p>
       <p className="belt-value">
-        <span className="belt-label">to the next</span>
+        <span className="belt-label">to next</span>
         {spanMm === null ? "–" : roundedSize(spanMm, unit)}
       </p>
       <div className="belt-tools">

@@ -6,7 +6,7 @@ type Props = { refusal: Refusal; pulleys: readonly NamedPulley[]; view: View; bo
 
 const width = 250;
 
-/** Why the belt does not close, beside the pulley that is in the way of it. */
+/** Why the belt does not close, in its first sentence, beside the pulley that keeps it from it; what to do stands with the results. */
 export function RefusalNote({ refusal, pulleys, view, board }: Props) {
   const pulley = refusal.pulley === null ? undefined : pulleys[refusal.pulley];
   const at = pulley ? toPx(view, pulley) : { x: board.width / 2, y: 12 };
@@ -23,7 +23,7 @@ export function RefusalNote({ refusal, pulleys, view, board }: Props) {
         ...(isBelow ? { top: Math.max(top, 8) } : { bottom: Math.max(board.height - at.y + reach, 8) }),
       }}
     >
-      {refusal.words}
+      {refusal.words.replace(/\. .*$/, ".")}
     </p>
   );
 }

@@ -1,6 +1,7 @@
 import type { KeyboardEvent, PointerEvent } from "react";
 import { beltRouteLimits } from "#shared/domain/beltRoute";
 import { keyStep } from "./keyStep";
+import { rimHandleBox } from "./rimHandleBox";
 
 type Props = {
   id: number;
@@ -16,6 +17,7 @@ type Props = {
 
 /** On the right of the chosen pulley: its diameter, to be dragged wider or set with the arrow keys. */
 export function RimHandle({ id, name, diameter, x, y, radius, onHold, onDiameter }: Props) {
+  const box = rimHandleBox({ x, y }, radius);
   const onKeyDown = (event: KeyboardEvent) => {
     const sign = { ArrowUp: 1, ArrowRight: 1, ArrowDown: -1, ArrowLeft: -1 }[event.key];
     if (!sign) return;
@@ -32,11 +34,11 @@ export function RimHandle({ id, name, diameter, x, y, radius, onHold, onDiameter
       aria-valuenow={diameter}
       aria-valuetext={`${diameter} mm`}
       className="belt-rim"
-      style={{ transform: `translate(${x + radius + 4}px, ${y - 22}px)` }}
+      style={{ transform: `translate(${box.x - box.width / 2}px, ${box.y - box.height / 2}px)` }}
       onPointerDown={(event) => onHold(event, id)}
       onKeyDown={onKeyDown}
     >
-      <svg width={36} height={44} viewBox="-16 -22 36 44" aria-hidden="true">
+      <svg width={box.width} height={box.height} viewBox="-16 -22 36 44" aria-hidden="true">
         <path d="M-16 0H-9" stroke="var(--color-measured)" strokeWidth={1.5} />
         <path d="M-9 0L-3 -6V6ZM9 0L3 -6V6Z" fill="var(--color-measured)" />
       </svg>

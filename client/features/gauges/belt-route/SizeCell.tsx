@@ -38,12 +38,11 @@ export function SizeCell({ label, words, mm, unit, range, isPlace = false, onMm 
   const problem = "problem" in result ? result.problem : undefined;
   return (
     <div className="belt-cell">
-      <label htmlFor={id}>
-        <span aria-hidden="true">{label}</span>
-        <span className="sr-only">{words}</span>
-      </label>
+      <span className="belt-label" aria-hidden="true">
+        {label}
+      </span>
       <input
-        id={id}
+        aria-label={words}
         className="input tabular-nums"
         value={draft ?? shown(mm, unit)}
         autoComplete="off"

@@ -3,7 +3,7 @@ import { type NamedPulley, pulleyName } from "./beltState";
 import { type Board, toPx, type View } from "./boardView";
 
 type Point = { x: number; y: number };
-type Box = Point & { width: number; height: number };
+export type Box = Point & { width: number; height: number };
 type Line = { from: Point; to: Point };
 type Disc = Point & { r: number };
 /** Words with their middle; `way` remembers where they stand, so that they stay there while there is room. */
@@ -14,11 +14,9 @@ const letter = 7.1;
 const lineHeight = 17;
 export const noLabels: BoardLabels = { names: [], spans: [] };
 
-const meetsDisc = ({ x, y, width, height }: Box, disc: Disc) => {
-  const dx = Math.max(Math.abs(disc.x - x) - width / 2, 0);
-  const dy = Math.max(Math.abs(disc.y - y) - height / 2, 0);
-  return dx * dx + dy * dy < disc.r * disc.r;
-};
+/** Room between a box and a disc; less than 0 where they meet. */
+const between = ({ x, y, width, height }: Box, disc: Disc) =>
+  Math.hypot(Math.max(Math.abs(disc.x - x) - width / 2, 0), Math.max(Math.abs(disc.y - y) - height / 2, 0)) - disc.r;
 
 const meetsBox = (a: Box, b: Box) =>
   Math.abs(a.x - b.x) < (a.width + b.width) / 2 + 3 && Math.abs(a.y - b.y) < (a.height + b.height) / 2 + 1;
@@ -55,22 +53,24 @@ function cost(box: Box, { board, discs, lines, halfBelt, taken }: Scene): number
     (isOut ? 400 : 0) +
     taken.filter((other) => meetsBox(box, other)).length * 100 +
     lines.filter((line) => meetsLine(grown, line)).length * 60 +
-    discs.filter((disc) => meetsDisc(box, disc)).length * 60
+    discs.filter((disc) => between(box, disc) < 0).length * 60
   );
 }
 
-function best(
-  id: number,
-  boxes: readonly Box[],
-  scene: Scene,
-  before: readonly Label[],
-  price: (way: number) => number,
-) {
-  const keptWay = before.find((label) => label.id === id)?.way;
-  let found: { box: Box; way: number; cost: number } | undefined;
+type Found = { box: Box; way: number; cost: number };
+
+/** The cheapest of the boxes. Words that stand well stay there, which also spares looking at the others in each frame. */
+function best(boxes: readonly Box[], scene: Scene, keptWay: number | undefined, price: (way: number) => number): Found {
+  const costOf = (way: number) => cost(boxes[way]!, scene) + price(way);
+  const kept = keptWay === undefined || !boxes[keptWay] ? undefined : costOf(keptWay);
+  let found: Found = { box: boxes[0]!, way: 0, cost: Number.POSITIVE_INFINITY };
+  if (keptWay !== undefined && kept !== undefined) {
+    found = { box: boxes[keptWay]!, way: keptWay, cost: kept - 12 };
+    if (kept <= 6) return found;
+  }
   for (const [way, box] of boxes.entries()) {
-    const whole = cost(box, scene) + price(way) - (way === keptWay ? 12 : 0);
-    if (!found || whole < found.cost) found = { box, way, cost: whole };
+    const whole = way === keptWay ? found.cost : costOf(way);
+    if (whole < found.cost) found = { box, way, cost: whole };
   }
   return found;
 }
@@ -110,12 +110,24 @@ const beside = ({ from, to }: Line, width: number, halfBelt: number): Box[] => {
   );
 };
 
+/** In a pulley of this radius, px, the arrow that shows how it turns has room; else it stands outside. */
+export const hasInnerArrow = (radius: number): boolean => radius >= 26;
+
 /** Of a pulley that is large enough, the number stands on itself. */
 export const hasOwnNumber = (pulley: NamedPulley, { scale }: View): boolean => (pulley.diameter / 2) * scale >= 13;
 
-/** What stands beside pulley i: its number where it has none on itself, its name, and its wrap while there is a route. */
-export const nameWords = (pulley: NamedPulley, index: number, wrapDeg: number | undefined, view: View) => ({
-  name: `${hasOwnNumber(pulley, view) || !pulley.name.trim() ? "" : `${index + 1} `}${pulleyName(pulley, index)}`,
+/**
+ * What stands beside pulley i: its number where it has none on itself, or where names come to stand closely; its name; and
+ * its wrap while there is a route.
+ */
+export const nameWords = (
+  pulley: NamedPulley,
+  index: number,
+  wrapDeg: number | undefined,
+  view: View,
+  { width }: Board,
+) => ({
+  name: `${pulley.name.trim() && (width < 560 || !hasOwnNumber(pulley, view)) ? `${index + 1} ` : ""}${pulleyName(pulley, index)}`,
   wrap: wrapDeg === undefined ? "" : `${wrapDeg.toFixed(wrapDeg < 10 ? 1 : 0)}°`,
 });
 
@@ -131,6 +143,7 @@ export function boardLabels(
   view: View,
   board: Board,
   before: BoardLabels,
+  taken: readonly Box[],
 ): BoardLabels {
   const halfBelt = Math.max((thickness * view.scale) / 2, 1.2);
   const discs = pulleys.map((pulley) => ({
@@ -142,24 +155,33 @@ export function boardLabels(
     from: toPx(view, leave),
     to: toPx(view, contacts[(i + 1) % contacts.length]!.arrive),
   }));
-  const scene: Scene = { board, discs, lines, halfBelt, taken: [] };
+  // The upper right corner has the length of the belt.
+  const corner = { x: board.width - 80, y: 14, width: 160, height: 28 };
+  const scene: Scene = { board, discs, lines, halfBelt, taken: [corner, ...taken] };
   // The smallest first: its name must stand near it, that of a large one has room all round.
   const order = pulleys.map((_, i) => i).sort((a, b) => pulleys[a]!.diameter - pulleys[b]!.diameter);
-  const names = order.flatMap((i) => {
-    const { name, wrap } = nameWords(pulleys[i]!, i, route?.wrapsDeg[i], view);
+  const wayOf = (labels: readonly Label[], id: number) => labels.find((label) => label.id === id)?.way;
+  const names = order.map((i) => {
+    const { id } = pulleys[i]!;
+    const { name, wrap } = nameWords(pulleys[i]!, i, route?.wrapsDeg[i], view, board);
     const boxes = around(discs[i]!, (name.length + wrap.length + 1) * letter + 6);
-    const found = best(pulleys[i]!.id, boxes, scene, before.names, (way) => Math.floor(way / directions) * 14);
-    if (!found) return [];
-    scene.taken.push(found.box);
-    return [{ id: pulleys[i]!.id, x: found.box.x, y: found.box.y, way: found.way }];
+    // Beside another pulley a name would be taken for that one's.
+    const price = (one: number) => {
+      const own = between(boxes[one]!, discs[i]!);
+      const isAstray = discs.some((disc, other) => other !== i && between(boxes[one]!, disc) < own + 3);
+      return Math.floor(one / directions) * 14 + (isAstray ? 45 : 0);
+    };
+    const { box, way } = best(boxes, scene, wayOf(before.names, id), price);
+    scene.taken.push(box);
+    return { id, x: box.x, y: box.y, way };
   });
   const spans = lines.flatMap((line, i) => {
+    const { id } = pulleys[i]!;
     const boxes = beside(line, spanWords[i]!.length * letter + 4, halfBelt);
-    const id = pulleys[i]!.id;
-    const found = best(id, boxes, scene, before.spans, (way) => Math.floor(way / 2) * 3);
-    if (!found || found.cost >= 50) return [];
-    scene.taken.push(found.box);
-    return [{ id, x: found.box.x, y: found.box.y, way: found.way }];
+    const { box, way, cost: whole } = best(boxes, scene, wayOf(before.spans, id), (one) => Math.floor(one / 2) * 3);
+    if (whole >= 50) return [];
+    scene.taken.push(box);
+    return [{ id, x: box.x, y: box.y, way }];
   });
   return { names, spans };
 }

@@ -8,6 +8,9 @@ export function turnArrow(radius: number, middle: number, spread: number, turn: 
     return `${(r * Math.cos(angle)).toFixed(1)} ${(-r * Math.sin(angle)).toFixed(1)}`;
   };
   const [start, end] = [middle - (turn * spread) / 2, middle + (turn * spread) / 2];
-  const back = end - turn * Math.min((7 / radius) * (180 / Math.PI), spread / 2);
-  return `M${at(start)}A${radius} ${radius} 0 0 ${turn > 0 ? 0 : 1} ${at(end)}M${at(back, radius + 4)}L${at(end)}L${at(back, radius - 4)}`;
+  const [long, wide] = [Math.min(7, radius * 0.75), Math.min(4, radius * 0.45)];
+  // The head follows a chord of the arc, so that it looks straight at a small radius too.
+  const back = end - turn * Math.min((long / radius) * (180 / Math.PI), spread / 2);
+  const arc = `M${at(start)}A${radius} ${radius} 0 ${spread > 180 ? 1 : 0} ${turn > 0 ? 0 : 1} ${at(end)}`;
+  return `${arc}M${at(back, radius + wide)}L${at(end)}L${at(back, radius - wide)}`;
 }

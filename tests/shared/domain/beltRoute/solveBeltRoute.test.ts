@@ -113,9 +113,15 @@ describe("crossed belts", () => {
 });
 
 describe("warnings", () => {
-  it("little wrap to drive with, but not on the back", () => {
+  it("little wrap to drive with: under 90 degrees inside, under 30 on the back", () => {
     const { warnings } = solveBeltRoute(route(layouts["one on the back"]!, 1.2));
-    expect(warnings).toEqual([{ pulley: 3, words: expect.stringContaining("Pulley 4 has only 85° of wrap") }]);
+    expect(warnings).toEqual([
+      { pulley: 1, words: expect.stringContaining("Pulley 2 has only 12° of wrap") },
+      { pulley: 3, words: expect.stringContaining("Pulley 4 has only 85° of wrap") },
+    ]);
+    const pressed = [pulley(0, 0, 40), pulley(100, 0, 24, "back"), pulley(200, 0, 40)];
+    expect(solveBeltRoute(route(pressed)).wrapsDeg[1]).toBeGreaterThan(30);
+    expect(words(route(pressed))).toEqual([]);
   });
   it("none for a right angle", () => {
     expect(words(route([pulley(0, 0, 18), pulley(130, 0, 18), pulley(130, 70, 18), pulley(0, 70, 18)]))).toEqual([]);
