@@ -13,8 +13,10 @@ export function AgeChart({ kind, dimension, sizeMm }: Props) {
   const [place, width] = useOwnWidth(640);
   const rows = ageRows(kind, dimension, sizeMm);
   const reach = Math.max(...rows.map(({ correctionMm, spreadMm }) => Math.abs(correctionMm) + spreadMm)) * 1.05;
-  const step = niceStep(reach / 2);
-  const xOf = (mm: number) => width / 2 + (mm / reach) * (width / 2 - 56);
+  const arm = width / 2 - 44;
+  const xOf = (mm: number) => width / 2 + (mm / reach) * arm;
+  // Labels stand at least 48 px apart, and not more than a few to a side.
+  const step = niceStep(reach * Math.max(48 / arm, 0.28));
   const count = Math.floor(reach / step);
   const ticks = Array.from({ length: 2 * count + 1 }, (_, i) => (i - count) * step);
   return (

@@ -8,6 +8,7 @@ import { changeWords } from "../../../client/features/guides/changeWords";
 import { coarsestInstrument } from "../../../client/features/guides/coarsestInstrument";
 import { exampleSizes } from "../../../client/features/guides/exampleSizes";
 import { GuidePage } from "../../../client/features/guides/GuidePage";
+import { niceStep } from "../../../client/features/guides/niceStep";
 import { workExample } from "../../../client/features/guides/workedExample";
 import { capitalised } from "../../../client/lib/capitalised";
 import { renderAt } from "../support/renderAt";
@@ -165,5 +166,17 @@ describe("coarsestInstrument", () => {
   it("asks for more than a rule where the band is narrow, and gives up where nothing is fine enough", () => {
     expect(coarsestInstrument("idler-wheel", "treadWidth", 6)).toBe("steel-rule");
     expect(coarsestInstrument("idler-wheel", "bore", 4)).toBeUndefined();
+  });
+});
+
+describe("niceStep", () => {
+  it.each([
+    [0.21, 0.5],
+    [0.2, 0.2],
+    [1, 1],
+    [5.1, 10],
+    [33, 50],
+  ])("rounds %d up to %d", (least, step) => {
+    expect(niceStep(least)).toBeCloseTo(step, 12);
   });
 });
