@@ -60,7 +60,8 @@ export function LengthSlot(props: Props) {
     <span className={note ? "strip-size-noted" : "strip-size"}>
       <span>
         <label htmlFor={id} className="text-soft">
-          <DimensionLabel name={name} />{" "}
+          <DimensionLabel name={name} />
+          {"\u00a0"}
         </label>
         {(!isMeasured || isWorkedOut(text)) && workedOut}
         <input

@@ -25,7 +25,7 @@ export function MeasuringHelp({ kind, shown }: { kind: PartKind; shown: readonly
       </summary>
       {isOpen && (
         <div className="py-3">
-          <Suspense fallback={<p className="text-soft">Fetching the pictures</p>}>
+          <Suspense fallback={<p className="min-h-80 text-soft">Fetching the pictures</p>}>
             <HowToMeasure kind={kind} dimensions={shown} />
           </Suspense>
         </div>
