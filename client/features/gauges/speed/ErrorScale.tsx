@@ -3,8 +3,8 @@ import type { SpeedLimit } from "#shared/domain/speedLimits";
 import { axisMarks } from "../../../lib/axisMarks";
 import { useOwnWidth } from "../../../ui/drawing/useOwnWidth";
 import { RuledHeading } from "../../../ui/RuledHeading";
-import { centMarks, limitsOf, rangeFor } from "./errorScale";
 import { signed } from "./errorWords";
+import { centMarks, limitsOf, rangeFor } from "./scaleMarks";
 
 type Props = { error: SpeedError; medium: SpeedLimit["medium"] };
 

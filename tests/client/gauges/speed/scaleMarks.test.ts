@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { centMarks, limitsOf, rangeFor } from "../../../../client/features/gauges/speed/errorScale";
 import { errorSentence, semitoneWords, signed } from "../../../../client/features/gauges/speed/errorWords";
+import { centMarks, limitsOf, rangeFor } from "../../../../client/features/gauges/speed/scaleMarks";
 
 describe("the scale of errors", () => {
   it("is wide enough for the limits and for the error", () => {
