@@ -2,7 +2,7 @@ import { reachOf } from "./coverModel";
 import type { Market } from "./Market";
 
 /** So many choices are looked at; beyond, the solver has to find it by itself. A matter of milliseconds. */
-const mostSteps = 20_000;
+export const mostChoiceSteps = 20_000;
 
 /**
  * The fewest workshops that can cover every need between them, and all workshops that belong to any such fewest choice;
@@ -11,7 +11,10 @@ const mostSteps = 20_000;
  * Why: whoever is in no smallest choice cannot be in a plan of fewest parcels, and without them the model is small.
  *      Shown of a market in which every need can be met.
  */
-export function smallestChoices(market: Market): { parcels: number; among: Set<number> } | undefined {
+export function smallestChoices(
+  market: Market,
+  mostSteps: number,
+): { parcels: number; among: Set<number> } | undefined {
   const reach = reachOf(market);
   const among = new Set<number>();
   let steps = 0;

@@ -3,7 +3,7 @@ import { coverModel } from "./coverModel";
 import { type Market, marketOf, narrowed, waysOf } from "./Market";
 import { rowOf } from "./Milp";
 import { lowestChance, planOf, soonestDays } from "./planOf";
-import { smallestChoices } from "./smallestChoices";
+import { mostChoiceSteps, smallestChoices } from "./smallestChoices";
 import { solveInOrder } from "./solveInOrder";
 
 type Seconds = () => number;
@@ -15,8 +15,8 @@ function leastTotal(market: Market, seconds: Seconds): Promise<number[]> {
 }
 
 /** Units of each offer for the fewest parcels; then the least total, then the fewest units. */
-async function fewestParcels(market: Market, seconds: Seconds): Promise<{ market: Market; units: number[] }> {
-  const smallest = smallestChoices(market);
+async function fewestParcels(market: Market, seconds: Seconds, mostSteps: number) {
+  const smallest = smallestChoices(market, mostSteps);
   const left = smallest ? narrowed(market, { among: smallest.among }) : market;
   const { objectives, rows, uppers } = coverModel(left);
   const { parcels, total, bought } = objectives;
@@ -37,7 +37,11 @@ async function fewestParcels(market: Market, seconds: Seconds): Promise<{ market
  *           needs that cannot be met are just those that all stock together does not cover, and each is named.
  * Errors:   DomainError for ids that stand twice or name nothing; NotProved where `seconds` (what is left) ran out.
  */
-export async function solveBasket(request: BasketPlanRequest, seconds: Seconds): Promise<BasketPlanAnswer> {
+export async function solveBasket(
+  request: BasketPlanRequest,
+  seconds: Seconds,
+  mostSteps = mostChoiceSteps,
+): Promise<BasketPlanAnswer> {
   const market = marketOf(request);
   const infeasible = request.needs.flatMap(({ id, quantity }, need) => {
     const units = waysOf(market, need).reduce((sum, way) => sum + way.units, 0);
@@ -51,14 +55,13 @@ export async function solveBasket(request: BasketPlanRequest, seconds: Seconds):
     };
   }
   const cheapest = planOf(request, market, await leastTotal(market, seconds));
-  const fewest = await fewestParcels(market, seconds);
+  const fewest = await fewestParcels(market, seconds, mostSteps);
 
   /** The least total of a narrower market: the least of all where that already keeps within it. */
   const within = async (limits: Parameters<typeof narrowed>[1], isKept: (plan: BasketPlan) => boolean) => {
     if (isKept(cheapest)) return cheapest;
     const narrower = narrowed(market, limits);
-    const plan = planOf(request, narrower, await leastTotal(narrower, seconds));
-    return plan;
+    return planOf(request, narrower, await leastTotal(narrower, seconds));
   };
   const leastChance = lowestChance(market);
   const latestDays = soonestDays(market);

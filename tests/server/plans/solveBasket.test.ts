@@ -59,6 +59,14 @@ describe("the four plans", () => {
     );
   }, 300_000);
 
+  it("have the fewest parcels as well where the solver has to find them by itself", async () => {
+    for (const basket of fc.sample(smallBasket, { numRuns: 40, seed: 11 })) {
+      const { plans } = await solveBasket(basket, () => 60, 0);
+      const plan = plans.fewestParcels;
+      if (plan) expect(measures.fewestParcels(plan)).toEqual(bestByTrying(basket, "fewestParcels"));
+    }
+  }, 300_000);
+
   it("are the same when asked again", async () => {
     for (const basket of fc.sample(smallBasket, { numRuns: 10, seed: 3 })) {
       expect(await solve(basket)).toEqual(await solve(basket));
