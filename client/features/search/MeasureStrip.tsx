@@ -43,7 +43,9 @@ export function MeasureStrip({ initial, look, action, submitWords, aside }: Prop
   const navigate = useNavigate();
   const location = useLocation();
   const form = useRef<HTMLFormElement>(null);
-  const { tools, fetchTools } = useStripTools(!isMeasured || isBelt(kind) || Object.keys(initial.lengths).length > 0);
+  const { tools, fetchTools } = useStripTools(
+    !isMeasured || isBelt(kind) || shown.some((name) => values.lengths[name]),
+  );
   const sizes = sizesAsRead(values, tools);
   const large = look === "large";
 

@@ -1,4 +1,4 @@
-import { use, useState } from "react";
+import { use, useEffect, useState } from "react";
 import type { stripTools } from "./stripTools";
 
 export type StripTools = typeof stripTools;
@@ -22,10 +22,13 @@ export function fetchStripTools(): Promise<StripTools | undefined> {
  * What reads sizes and says what follows from them. The first page does without it until somebody begins to write
  * (`fetchTools`); a strip that opens with something to say waits for it, so that nothing moves when it is said.
  */
-export function useStripTools(isNeededAtOnce: boolean) {
-  const [isAwaited] = useState(isNeededAtOnce);
+export function useStripTools(isNeeded: boolean) {
+  const [isAwaited] = useState(isNeeded);
   const [fetched, setFetched] = useState(tools);
   const found = fetched ?? tools ?? (isAwaited ? use(fetchStripTools()) : undefined);
+  useEffect(() => {
+    if (isNeeded) void fetchStripTools().then(setFetched);
+  }, [isNeeded]);
   const fetchTools = async () => {
     const late = await fetchStripTools();
     setFetched(late);
