@@ -18,7 +18,7 @@ export const spindleLimits = { min: 1, max: 40 };
 const edgeMm = 1.5;
 /** Room for the label outside each ring. */
 const labelMm = 4.4;
-const deepestBarMm = 13;
+const [shallowestBarMm, deepestBarMm] = [2, 13];
 
 const byBars = (one: StrobeRing, other: StrobeRing) => other.bars - one.bars;
 
@@ -26,7 +26,8 @@ const byBars = (one: StrobeRing, other: StrobeRing) => other.bars - one.bars;
  * A stroboscope disc: the rings of the speeds wanted, those with most bars outside, sharing the room between the hub
  * and the edge. A bar and the gap after it are equally wide.
  *
- * Errors: DomainError on "mainsHz"; on "spindleMm" outside `spindleLimits`; on "speeds" where a speed is out of range or its bars would be too thin to print.
+ * Errors: DomainError on "mainsHz"; on "spindleMm" outside `spindleLimits`; on "speeds" where a speed is out of range, its bars
+ *         would be too thin to print, or the rings are too many.
  */
 export function layOutDisc(wanted: {
   mainsHz: number;
@@ -41,6 +42,9 @@ export function layOutDisc(wanted: {
   const rings = [...new Set(speeds)].flatMap((rpm) => ringsFor(mainsHz, rpm)).sort(byBars);
   const hub = Math.max(17, spindleMm / 2 + 10);
   const pitch = Math.min(deepestBarMm + labelMm, (radiusMm - edgeMm - hub) / Math.max(1, rings.length));
+  if (pitch < shallowestBarMm + labelMm) {
+    throw new DomainError("speeds", `The ${rings.length} rings of these speeds do not fit: choose fewer.`);
+  }
   return {
     radiusMm,
     spindleMm,

@@ -1,13 +1,21 @@
 import { barsPerMinuteFor } from "#shared/domain/strobe";
 import type { DiscRing } from "./discLayout";
-import { shortNumber, speedName } from "./strobeWords";
+import { shortNumber } from "./strobeWords";
 
 type Part = { heading?: string; text: string };
 
-const exactNote = (ring: DiscRing) =>
-  `The ring of ${ring.bars} bars shows ${speedName(ring.rpm)} rpm exactly, ${ring.barsPerFlash} bars passing at each flash. ` +
-  `Its bars are sharp only under short flashes, and it also stands still at every ${ring.barsPerFlash === 2 ? "half" : ring.barsPerFlash === 3 ? "third" : "quarter"} of that speed: ` +
-  "set the speed by the other ring first.";
+/** One note for all rings whose bars pass by twos, threes or fours. */
+function exactNote(rings: readonly DiscRing[]): Part[] {
+  const [one, other] = rings;
+  if (!one) return [];
+  const text = other
+    ? "Rings with bars by 2s, 3s or 4s show the true speed exactly, so many bars passing at each flash. Their bars are sharp only " +
+      "under short flashes, and they also stand still at every 2nd, 3rd or 4th part of that speed: set the speed by the other ring first."
+    : `The ring of ${one.bars} bars shows the true speed exactly, ${one.barsPerFlash} bars passing at each flash. Its bars are sharp only ` +
+      `under short flashes, and it also stands still at every ${["half", "third", "quarter"][one.barsPerFlash - 2]} of that speed: ` +
+      "set the speed by the other ring first.";
+  return [{ text }];
+}
 
 /** How a disc is read, and what to mind: beside its rings on the sheet and on the page. */
 export function readingParts(mainsHz: number, rings: readonly DiscRing[]): { left: Part[]; right: Part[] } {
@@ -16,7 +24,7 @@ export function readingParts(mainsHz: number, rings: readonly DiscRing[]): { lef
   const multiple = rings.filter(({ barsPerFlash }) => barsPerFlash > 1);
   return {
     left: [
-      ...multiple.map((ring) => ({ text: exactNote(ring) })),
+      ...exactNote(multiple),
       {
         heading: "The lamp",
         text:

@@ -1,4 +1,5 @@
 import { isExact } from "#shared/domain/strobe";
+import { textWidth } from "../textWidth";
 import { barSteps, type Disc, type DiscRing, layOutDisc } from "./discLayout";
 import { framedPage, type Room, roomOf } from "./pageFrame";
 import type { Paper } from "./papers";
@@ -30,17 +31,22 @@ function discItems(disc: Disc, cx: number, cy: number): SheetItem[] {
   ];
 }
 
+const labelLook = { sizeMm: 2.7, weight: 600 } as const;
+
 function ringLabels(ring: DiscRing, cx: number, cy: number): SheetItem[] {
   const speed = isExact(ring) ? "" : ` · for ${speedName(ring.rpm)}`;
   const label = `${shownWords(ring)} · ${barsWords(ring)}${speed}`;
-  return [-90, 90].flatMap((deg) => wordsAround(cx, cy, ring.outerMm + 1.2, deg, label, { sizeMm: 2.7, weight: 600 }));
+  const radius = ring.outerMm + 1.2;
+  // Twice, so that it can be read from either side, where there is room for two.
+  const isRoom = textWidth(label, labelLook.sizeMm, labelLook.weight) < 0.42 * 2 * Math.PI * radius;
+  return (isRoom ? [-90, 90] : [-90]).flatMap((deg) => wordsAround(cx, cy, radius, deg, label, labelLook));
 }
 
 const rowMm = 4.4;
 
 /** The rings from the outside inwards, a line each. */
 function ringTable(rings: readonly DiscRing[], left: number, top: number, width: number): SheetItem[] {
-  const columns = [0, 0.13, 0.37, 0.655].map((share) => left + share * width);
+  const columns = [0, 0.115, 0.345, 0.655].map((share) => left + share * width);
   const look = { sizeMm: 2.6 };
   const rows = [
     ["For rpm", "Ring", "stands still at", "At that speed, bars go"],
@@ -68,7 +74,7 @@ type Below = { height: number; draw: (top: number) => SheetItem[] };
 function below({ mainsHz, speeds, spindleMm }: StrobeSheetInput, room: Room): Below {
   const { rings } = layOutDisc({ mainsHz, speeds, spindleMm, radiusMm: 1e4 });
   const width = room.right - room.besideLeft;
-  const tableWidth = width * 0.545;
+  const tableWidth = width * 0.57;
   const textLeft = room.besideLeft + tableWidth + 5;
   const textWidth = room.right - textLeft;
   const parts = readingParts(mainsHz, rings);
