@@ -47,7 +47,7 @@ export function BeltResults({ state, solved, unit }: Props) {
           Find this belt
         </LinkButton>
       )}
-      <section className="grid gap-2">
+      <section className="belt-mind grid gap-2">
         <RuledHeading>Mind</RuledHeading>
         {refusal && <p className="font-semibold text-outband">{refusal.words}</p>}
         {!route && !refusal && <p className="font-semibold text-outband">The belt waits for its numbers below.</p>}

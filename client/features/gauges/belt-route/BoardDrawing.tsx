@@ -6,7 +6,7 @@ import { BeltLine } from "./BeltLine";
 import { BoardGrid } from "./BoardGrid";
 import { BoardLabel } from "./BoardLabel";
 import type { NamedPulley } from "./beltState";
-import { type BoardLabels, boardLabels, hasOwnNumber, nameWords, noLabels } from "./boardLabels";
+import { type BoardLabels, boardLabels, freeSideOf, hasOwnNumber, nameWords, noLabels } from "./boardLabels";
 import { type Board, toPx, type View } from "./boardView";
 import { PulleyMark } from "./PulleyMark";
 import { rimHandleBox } from "./rimHandleBox";
@@ -24,12 +24,6 @@ type Props = {
   view: View;
   board: Board;
 };
-
-/** Direction of a pulley's free side, opposite the middle of its wrap, in whole degrees. */
-function freeSideOf({ contacts }: BeltRoute, i: number): number {
-  const { x, y, arrive, wrap, turn } = contacts[i]!;
-  return Math.round(((Math.atan2(arrive.y - y, arrive.x - x) + (turn * wrap) / 2 + Math.PI) * 180) / Math.PI);
-}
 
 /** The machine from above, to scale, with its belt, names and lengths. */
 export function BoardDrawing({
@@ -67,7 +61,7 @@ export function BoardDrawing({
           number={i + 1}
           {...toPx(view, pulley)}
           radius={(pulley.diameter / 2) * view.scale}
-          freeSide={live ? freeSideOf(live, i) : null}
+          freeSide={live?.contacts[i] ? freeSideOf(live.contacts[i]) : null}
           turn={live?.contacts[i]?.turn ?? 1}
           beltPx={Math.max(thickness * view.scale, 2)}
           hasNumber={hasOwnNumber(pulley, view)}
@@ -84,10 +78,10 @@ export function BoardDrawing({
         {labels.spans.map(({ id, x, y }) => (
           <BoardLabel key={id} x={x} y={y} soft={spanWords[indexOf.get(id) ?? 0] ?? ""} />
         ))}
-        {labels.names.map(({ id, x, y }) => {
+        {labels.names.map(({ id, x, y, isShort }) => {
           const i = indexOf.get(id) ?? 0;
           const { name, wrap } = nameWords(pulleys[i]!, i, live?.wrapsDeg[i], view, board);
-          return <BoardLabel key={id} x={x} y={y} strong={name} soft={wrap} />;
+          return <BoardLabel key={id} x={x} y={y} strong={isShort ? `${i + 1}` : name} soft={isShort ? "" : wrap} />;
         })}
       </g>
     </svg>
