@@ -17,11 +17,17 @@ const anyNumber = fc.oneof(
 );
 const anyValue = fc.oneof({ weight: 3, arbitrary: anyNumber }, { weight: 1, arbitrary: fc.jsonValue({ maxDepth: 2 }) });
 
-/** A body with its own shape, in which numbers are others as often as not, and now and then a part is anything at all. */
+/** A body with its own shape, in which numbers are others now and then, and more rarely a part is anything at all. */
 function like(value: unknown): fc.Arbitrary<unknown> {
   const usual = (): fc.Arbitrary<unknown> => {
-    if (typeof value === "number") return fc.oneof(anyNumber, fc.constant(value));
-    if (Array.isArray(value)) return fc.array(like(value[0]), { maxLength: 6 });
+    if (typeof value === "number")
+      return fc.oneof({ weight: 6, arbitrary: fc.constant(value) }, { weight: 2, arbitrary: anyNumber });
+    if (Array.isArray(value)) {
+      return fc.oneof(
+        { weight: 4, arbitrary: fc.tuple(...value.map(like)) },
+        { weight: 1, arbitrary: fc.array(like(value[0]), { maxLength: 6 }) },
+      );
+    }
     if (typeof value !== "object" || value === null) return fc.constant(value);
     const fields = Object.fromEntries(Object.entries(value).map(([name, inner]) => [name, like(inner)]));
     return fc.record(fields);
