@@ -1,4 +1,4 @@
-import { barsDepthMm, calibrationBars } from "./calibrationBars";
+import { barsDepthMm, barsLengthMm, calibrationBars } from "./calibrationBars";
 import { marginMm, type Paper, papers } from "./papers";
 import { circle, line, path, rectangle } from "./paths";
 import type { SheetItem, SheetPage } from "./Sheet";
@@ -69,7 +69,7 @@ export function framedPage(
   const [left, width, bottom] = [marginMm, widthMm - 2 * marginMm, heightMm - marginMm];
   const titleTop = bottom - titleHeight;
   const barsLeft = left + barsDepthMm + 1.8 * gap;
-  const wordsLeft = barsLeft + 101.6 + gap * 1.6;
+  const wordsLeft = barsLeft + barsLengthMm + gap * 1.6;
   const frame: SheetItem[] = [
     path(rectangle(left, marginMm, width, heightMm - 2 * marginMm), { strokeMm: frameStroke }),
     ...titleBlock(left, titleTop, width, title, [
