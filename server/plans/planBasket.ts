@@ -8,9 +8,9 @@ import type { PlanTask, PlanWord } from "./PlanTask";
 const mostWaiting = 16;
 const comeAgainSeconds = 5;
 
-type Waiting = { done: (word: PlanWord) => void; failed: (error: unknown) => void };
+type Answer = PlanWord | { crashed: string };
 
-const waiting = new Map<number, Waiting>();
+const waiting = new Map<number, (answer: Answer) => void>();
 let thread: Worker | undefined;
 let count = 0;
 
@@ -19,28 +19,29 @@ function startThread(): Worker {
   const program = import.meta.url.endsWith(".ts") ? "./planWorkerFromSource.mjs" : "./planWorker.js";
   const started = new Worker(new URL(program, import.meta.url));
   started.on("message", (word: PlanWord) => {
-    const who = waiting.get(word.id);
+    const answer = waiting.get(word.id);
     waiting.delete(word.id);
-    who?.done(word);
+    answer?.(word);
     if (waiting.size === 0) started.unref();
   });
-  const fail = (error: unknown) => {
+  // A thread that ran out of memory has proved nothing; the next basket starts a new one.
+  const crash = (why: string) => {
     if (thread !== started) return;
     thread = undefined;
-    for (const who of waiting.values()) who.failed(error);
+    for (const answer of waiting.values()) answer({ crashed: why });
     waiting.clear();
   };
-  started.on("error", fail);
-  started.on("exit", (code) => fail(new Error(`the planning thread ended with ${code}`)));
+  started.on("error", (error) => crash(String(error)));
+  started.on("exit", (code) => crash(`the planning thread ended with ${code}`));
   return started;
 }
 
-function ask(basket: BasketPlanRequest): Promise<PlanWord> {
+function ask(basket: BasketPlanRequest): Promise<Answer> {
   thread ??= startThread();
   thread.ref();
   const task: PlanTask = { id: ++count, basket };
-  return new Promise((done, failed) => {
-    waiting.set(task.id, { done, failed });
+  return new Promise((answer) => {
+    waiting.set(task.id, answer);
     thread?.postMessage(task);
   });
 }
@@ -62,5 +63,6 @@ export async function planBasket(basket: BasketPlanRequest): Promise<BasketPlanA
   throw new DomainError(
     "offers",
     "There are too many ways to fill this basket to be sure of the best in time. Give fewer needs, workshops or offers.",
+    { cause: "crashed" in word ? word.crashed : word.notProved },
   );
 }

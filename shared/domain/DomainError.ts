@@ -10,7 +10,8 @@ export class DomainError extends Error {
   constructor(
     readonly field: string,
     readonly words: string,
+    options?: ErrorOptions,
   ) {
-    super(`${field}: ${words}`);
+    super(`${field}: ${words}`, options);
   }
 }

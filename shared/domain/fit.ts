@@ -37,6 +37,7 @@ export type Fit = { chance: number; verdict: Verdict; coverage: number; dimensio
 
 const isSize = (value: number) => value > 0 && value <= longestLengthMm;
 const isSpread = (value: number) => value >= 0 && value <= longestLengthMm;
+const isPlace = (value: number) => Math.abs(value) <= longestLengthMm;
 
 function checkInput({ kind, need, part, bands = {} }: FitInput) {
   for (const [group, sizes] of Object.entries({ need, part, bands })) {
@@ -60,8 +61,10 @@ function checkInput({ kind, need, part, bands = {} }: FitInput) {
       demand(isSpread(stated.plusMinusMm ?? 0), `part/${dimension}/plusMinusMm`, "A tolerance is 0 to 10 m.");
     }
     if (band) {
-      const ordered = Number.isFinite(band.lowerMm) && Number.isFinite(band.upperMm) && band.lowerMm <= band.upperMm;
-      demand(ordered, `bands/${dimension}/lowerMm`, "The lower limit must not lie above the upper one.");
+      const { lowerMm, upperMm } = band;
+      demand(isPlace(lowerMm), `bands/${dimension}/lowerMm`, "A limit lies at most 10 m either way.");
+      demand(isPlace(upperMm), `bands/${dimension}/upperMm`, "A limit lies at most 10 m either way.");
+      demand(lowerMm <= upperMm, `bands/${dimension}/lowerMm`, "The lower limit must not lie above the upper one.");
     }
   }
 }
