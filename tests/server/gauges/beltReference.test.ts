@@ -103,6 +103,11 @@ describe("belt sizes", () => {
     for (const got of Object.values((body as Route).insideCircumferenceMm)) expectNear(got, wanted, tolerance);
   });
 
+  it.each(casesOf(beltRelaxed, "size-03"))("%s, the other way round", async (_id, { inputs, expected, tolerance }) => {
+    const { body } = await path(Number(inputs.path_length_mm), 0, Number(expected.installed_stretch_pct));
+    expectNear((body as Route).insideCircumferenceMm.mid, inputs.relaxed_circumference_mm, tolerance);
+  });
+
   it.each(casesOf(beltSizes, "size-06"))("%s", async (_id, { inputs, expected, tolerance }) => {
     const thickness = Number(inputs.thickness_mm);
     const { body } = await path(Number(inputs.pitch_circumference_mm) - Math.PI * thickness, thickness);

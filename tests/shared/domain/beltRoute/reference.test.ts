@@ -1,6 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { type BeltWrap, solveBeltRoute } from "#shared/domain/beltRoute";
 import { DomainError } from "#shared/domain/DomainError";
+import relaxed from "../../../reference/beltRelaxed.json";
 import cases from "../../../reference/beltRoute.json";
 import { pulley, route } from "./layouts";
 
@@ -87,5 +88,22 @@ describe("the reference cases of belt routes", () => {
       expectNear(thick.pitchLengthMm, expected.pitch_line_length ?? 0, tolerance);
       expectNear(thick.insideCircumferenceMm.mid, expected.belt_inner_surface_length ?? 0, tolerance);
     }
+  });
+});
+
+describe("the reference cases of a belt's relaxed size", () => {
+  it.each(relaxed.map(({ id, ...rest }) => [id, rest] as const))("%s", (_id, { inputs, expected, tolerance }) => {
+    const thickness = inputs.thickness_mm ?? 0;
+    const length = inputs.path_length_mm ?? inputs.contact_path_mm ?? 0;
+    const stretch = inputs.installed_stretch_pct ?? expected.installed_stretch_pct ?? 0;
+    // Two pulleys of 50 mm, so far apart that a belt lying on them with its inside is just this long.
+    const apart = (length - 50 * Math.PI) / 2;
+    const got = solveBeltRoute({
+      pulleys: [pulley(0, 0, 50), pulley(apart, 0, 50)],
+      thickness,
+      stretchPercent: { min: stretch, max: stretch },
+    });
+    const wanted = expected.relaxed_circumference_mm ?? expected.relaxed_inside_mm ?? inputs.relaxed_circumference_mm;
+    expectNear(got.insideCircumferenceMm.mid, wanted ?? 0, tolerance);
   });
 });
