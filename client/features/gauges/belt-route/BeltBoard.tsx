@@ -1,16 +1,17 @@
-import { type KeyboardEvent, useCallback, useRef } from "react";
+import { type KeyboardEvent, useCallback, useMemo, useRef } from "react";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { Button } from "../../../ui/Button";
 import { useOwnWidth } from "../../../ui/drawing/useOwnWidth";
 import { useLastGood } from "../useLastGood";
-import { BoardDrawing } from "./BoardDrawing";
+import { BoardMoving } from "./BoardMoving";
+import { BoardStill } from "./BoardStill";
+import { BoardWords } from "./BoardWords";
 import { type BeltState, type NamedPulley, pulleyName } from "./beltState";
-import { toPx } from "./boardView";
 import { keyStep } from "./keyStep";
 import { PulleyHandle } from "./PulleyHandle";
 import { RefusalNote } from "./RefusalNote";
 import { RimHandle } from "./RimHandle";
-import { type Solved, solveState } from "./solveState";
+import type { Solved } from "./solveState";
 import { useBoardView } from "./useBoardView";
 import { usePulleyDrag } from "./usePulleyDrag";
 
@@ -34,9 +35,10 @@ const arrows: Record<string, readonly [number, number]> = {
 
 /** The drawing with what its pulleys are dragged by; each is reached by Tab and moved with the arrow keys. */
 export function BeltBoard(props: Props) {
-  const { state, unit, drawn, selectedId, onSelect, onChange } = props;
+  const { state, solved, unit, drawn, selectedId, onSelect, onChange } = props;
   const [place, width] = useOwnWidth(760);
-  const board = { width, height: Math.round(Math.min(Math.max(width * 0.66, 320), 560)) };
+  const height = Math.round(Math.min(Math.max(width * 0.66, 320), 560));
+  const board = useMemo(() => ({ width, height }), [width, height]);
   const latest = useRef(props);
   latest.current = props;
   const scale = useRef(1);
@@ -44,12 +46,12 @@ export function BeltBoard(props: Props) {
     (id: number, change: Partial<NamedPulley>) => latest.current.onChange(id, change, false),
     [],
   );
-  const { draft, hold, holdRim, handlers } = usePulleyDrag(state.pulleys, scale, onDrag);
-  const pulleys = draft ?? state.pulleys;
-  const { route, thicknessMm, refusal } = draft ? solveState({ ...state, pulleys }, unit) : props.solved;
-  const { good } = useLastGood(route && thicknessMm !== null ? { route, thicknessMm } : null);
-  const thickness = thicknessMm ?? good?.thicknessMm ?? 1;
-  const { view, closer, wider, fit } = useBoardView(pulleys, thickness, board, drawn, draft !== null);
+  const { held, heldId, hold, holdRim, handlers } = usePulleyDrag(state.pulleys, scale, onDrag);
+  const { pulleys } = state;
+  const { route, thicknessMm, refusal } = solved;
+  const { good } = useLastGood(thicknessMm);
+  const thickness = good ?? 1;
+  const { view, closer, wider, fit } = useBoardView(pulleys, thickness, board, drawn, heldId !== null);
   scale.current = view.scale;
 
   const onKey = useCallback((event: KeyboardEvent, id: number) => {
@@ -74,24 +76,34 @@ export function BeltBoard(props: Props) {
         className="belt-board gauge-sheet relative mt-2 overflow-hidden"
         {...handlers}
       >
-        <BoardDrawing
-          pulleys={pulleys}
-          route={route ?? good?.route ?? null}
-          isStale={!route}
-          refusedIndex={refusal?.pulley ?? null}
-          selectedId={selectedId}
-          thickness={thickness}
-          unit={unit}
-          view={view}
-          board={board}
-        />
+        <div className="belt-sheets">
+          <BoardStill
+            pulleys={pulleys}
+            heldId={heldId}
+            route={route}
+            refusedIndex={refusal?.pulley ?? null}
+            thickness={thickness}
+            view={view}
+            board={board}
+          />
+          <BoardMoving held={held} state={state} solved={solved} unit={unit} view={view} board={board} />
+          <BoardWords
+            pulleys={pulleys}
+            route={route}
+            selectedId={selectedId}
+            thickness={thickness}
+            unit={unit}
+            view={view}
+            board={board}
+          />
+        </div>
         {pulleys.map((pulley, i) => (
           <PulleyHandle
             key={pulley.id}
-            id={pulley.id}
+            pulley={pulley}
+            held={held}
+            view={view}
             words={`${pulleyName(pulley, i)}: x ${sizeOf(pulley.x)}, y ${sizeOf(pulley.y)}, ${sizeOf(pulley.diameter)} across`}
-            {...toPx(view, pulley)}
-            radius={(pulley.diameter / 2) * view.scale}
             isSelected={pulley.id === selectedId}
             onHold={hold}
             onKey={onKey}
@@ -100,11 +112,10 @@ export function BeltBoard(props: Props) {
         ))}
         {chosen && (
           <RimHandle
-            id={chosen.id}
+            pulley={chosen}
+            held={held}
+            view={view}
             name={pulleyName(chosen, selected)}
-            diameter={chosen.diameter}
-            {...toPx(view, chosen)}
-            radius={(chosen.diameter / 2) * view.scale}
             onHold={holdRim}
             onDiameter={(id, diameter) => onChange(id, { diameter }, true)}
           />

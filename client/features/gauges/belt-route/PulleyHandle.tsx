@@ -1,12 +1,14 @@
 import { type KeyboardEvent, memo, type PointerEvent } from "react";
+import type { NamedPulley } from "./beltState";
+import { toPx, type View } from "./boardView";
+import { type HeldPulley, useFollowed } from "./heldPulley";
 
 type Props = {
-  id: number;
+  pulley: NamedPulley;
+  held: HeldPulley;
+  view: View;
   /** Read out when it has the focus: name, place, size. */
   words: string;
-  x: number;
-  y: number;
-  radius: number;
   isSelected: boolean;
   onHold: (event: PointerEvent<Element>, id: number) => void;
   onKey: (event: KeyboardEvent, id: number) => void;
@@ -15,8 +17,11 @@ type Props = {
 
 /** What a pulley is dragged by, and moved with the arrow keys: lies over it, at least as large as a fingertip. */
 export const PulleyHandle = memo(function PulleyHandle(props: Props) {
-  const { id, words, x, y, radius, isSelected, onHold, onKey, onSelect } = props;
-  const reach = Math.max(radius, 22);
+  const { held, view, words, isSelected, onHold, onKey, onSelect } = props;
+  const pulley = useFollowed(held, props.pulley);
+  const { id } = pulley;
+  const { x, y } = toPx(view, pulley);
+  const reach = Math.max((pulley.diameter / 2) * view.scale, 22);
   return (
     <button
       type="button"

@@ -1,23 +1,25 @@
 import type { KeyboardEvent, PointerEvent } from "react";
 import { beltRouteLimits } from "#shared/domain/beltRoute";
+import type { NamedPulley } from "./beltState";
+import { toPx, type View } from "./boardView";
+import { type HeldPulley, useFollowed } from "./heldPulley";
 import { keyStep } from "./keyStep";
 import { rimHandleBox } from "./rimHandleBox";
 
 type Props = {
-  id: number;
+  pulley: NamedPulley;
+  held: HeldPulley;
+  view: View;
   name: string;
-  diameter: number;
-  /** Middle of its pulley, and the pulley's radius, px. */
-  x: number;
-  y: number;
-  radius: number;
   onHold: (event: PointerEvent<Element>, id: number) => void;
   onDiameter: (id: number, diameter: number) => void;
 };
 
 /** On the right of the chosen pulley: its diameter, to be dragged wider or set with the arrow keys. */
-export function RimHandle({ id, name, diameter, x, y, radius, onHold, onDiameter }: Props) {
-  const box = rimHandleBox({ x, y }, radius);
+export function RimHandle({ held, view, name, onHold, onDiameter, ...rest }: Props) {
+  const pulley = useFollowed(held, rest.pulley);
+  const { id, diameter } = pulley;
+  const box = rimHandleBox(toPx(view, pulley), (diameter / 2) * view.scale);
   const onKeyDown = (event: KeyboardEvent) => {
     const sign = { ArrowUp: 1, ArrowRight: 1, ArrowDown: -1, ArrowLeft: -1 }[event.key];
     if (!sign) return;

@@ -1,5 +1,6 @@
 import { beltRouteLimits } from "#shared/domain/beltRoute";
 import { parseLength } from "#shared/domain/length";
+import { parseSize } from "#shared/domain/parseSize";
 import { storedUnit } from "../../../lib/preferences";
 import { readPlainNumber } from "../readPlainNumber";
 import { withItsUnit } from "../withItsUnit";
@@ -47,7 +48,10 @@ export const beltCodec = {
     const kind = beltKinds.find((one) => one === params.get("kind")) ?? "flat-belt";
     const length = (name: string, otherwise: string) => {
       const text = params.get(name)?.trim() ?? "";
-      return text && parseLength(text, storedUnit()).ok ? text : otherwise;
+      const read = parseSize(text, storedUnit());
+      if (!read.ok) return otherwise;
+      // Several readings, or a size that was worked out: what they come to.
+      return parseLength(text, storedUnit()).ok ? text : `${Number(read.mm.toFixed(3))} mm`;
     };
     const [min = "", max = ""] = (params.get("stretch") ?? "").split("-");
     const isRange = [min, max].every((text) => readPlainNumber(text) !== null);

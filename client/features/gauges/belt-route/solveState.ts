@@ -62,6 +62,17 @@ export function solveState(state: BeltState, unit: SizeUnit): Solved {
 /** What is known of the length to buy at best: pulleys that were placed by hand. Common practice, no source. */
 const leastHalfShare = 0.005;
 
+/**
+ * A size that the belt is to have, as one that was worked out, since there is none to measure: to 5 %, at least 0.1 mm.
+ * Common practice, no source.
+ */
+function wantedSize(text: string, unit: SizeUnit): string {
+  const read = parseLength(text, unit);
+  if (!read.ok) return withItsUnit(text, unit);
+  const half = Math.min(Math.max(0.1, 0.05 * read.mm), read.mm / 2);
+  return `${Number(read.mm.toFixed(3))} ± ${Number(half.toFixed(3))} mm`;
+}
+
 /** The search for this belt: its length as one that was worked out, and all that the search knew before. */
 export function findAddress(state: BeltState, buyMm: { min: number; max: number }, unit: SizeUnit): string {
   const mid = (buyMm.min + buyMm.max) / 2;
@@ -71,8 +82,8 @@ export function findAddress(state: BeltState, buyMm: { min: number; max: number 
     insideCircumference: `${mid.toFixed(1)} ± ${half.toFixed(1)} mm`,
   });
   const { kind, thickness, width, handedOn } = state;
-  if (kind === "flat-belt" && width.trim()) params.set("width", withItsUnit(width, unit));
-  params.set(kind === "flat-belt" ? "thickness" : "section", withItsUnit(thickness, unit));
+  if (kind === "flat-belt" && width.trim()) params.set("width", wantedSize(width, unit));
+  params.set(kind === "flat-belt" ? "thickness" : "section", wantedSize(thickness, unit));
   params.set("condition", "missing");
   for (const [name, value] of Object.entries(handedOn)) params.set(name, value);
   return `/find?${params}`;

@@ -1,6 +1,6 @@
 import { type PointerEvent, type RefObject, startTransition, useEffect, useRef, useState } from "react";
-import { flushSync } from "react-dom";
 import type { NamedPulley } from "./beltState";
+import { createHeldPulley } from "./heldPulley";
 import { withPulley } from "./pulleyEdits";
 
 type Change = { x: number; y: number } | { diameter: number };
@@ -9,14 +9,14 @@ type Grip = { id: number; isRim: boolean; fromX: number; fromY: number; pulley: 
 /** What a px is worth decides how finely a drag sets, mm. */
 const stepOf = (scale: number) => (scale >= 8 ? 0.1 : scale >= 1.2 ? 0.5 : scale >= 0.3 ? 1 : 5);
 
-/** How often the page hears of a drag, ms; the board itself follows in each frame. */
+/** How often the page hears of a drag, ms; what is dragged and the belt follow in each frame. */
 const tellEveryMs = 120;
 
 /**
  * Dragging of pulleys (`hold`) and of their rims (`holdRim`), by mouse, pen or finger.
  *
- * However many events come, what was dragged last is drawn once in each frame, as `draft`: the pulleys while one is held.
- * The page, with its table and figures, hears of it a few times in a second, and when the pulley is let go.
+ * However many events come, what was dragged last is given to `held` once in each frame, for the belt and the pulley to
+ * follow. The rest of the page, with its words, table and figures, hears of it a few times in a second, and at the end.
  */
 export function usePulleyDrag(
   pulleys: readonly NamedPulley[],
@@ -24,7 +24,8 @@ export function usePulleyDrag(
   scale: RefObject<number>,
   onDrag: (id: number, change: Change) => void,
 ) {
-  const [draft, setDraft] = useState<readonly NamedPulley[] | null>(null);
+  const [held] = useState(createHeldPulley);
+  const [heldId, setHeldId] = useState<number | null>(null);
   const grip = useRef<Grip | null>(null);
   const next = useRef<Change | null>(null);
   const frame = useRef(0);
@@ -35,13 +36,13 @@ export function usePulleyDrag(
 
   const draw = (now: number) => {
     frame.current = 0;
-    const [held, change] = [grip.current, next.current];
-    if (!held || !change) return;
-    flushSync(() => setDraft(withPulley(latest.current.pulleys, held.id, change)));
+    const [gripped, change] = [grip.current, next.current];
+    if (!gripped || !change) return;
+    held.set(withPulley([gripped.pulley], gripped.id, change)[0] ?? null);
     if (now - toldAt.current < tellEveryMs) return;
     toldAt.current = now;
     // In slices between frames: the table must not hold up the board.
-    startTransition(() => latest.current.onDrag(held.id, change));
+    startTransition(() => latest.current.onDrag(gripped.id, change));
   };
 
   const begin = (event: PointerEvent<Element>, id: number, isRim: boolean) => {
@@ -50,30 +51,32 @@ export function usePulleyDrag(
     event.currentTarget.setPointerCapture?.(event.pointerId);
     grip.current = { id, isRim, fromX: event.clientX, fromY: event.clientY, pulley, scale: scale.current };
     next.current = null;
-    setDraft(latest.current.pulleys);
+    held.set(pulley);
+    setHeldId(id);
   };
   const release = () => {
-    const [held, change] = [grip.current, next.current];
-    if (!held) return;
+    const [gripped, change] = [grip.current, next.current];
+    if (!gripped) return;
     cancelAnimationFrame(frame.current);
     frame.current = 0;
     grip.current = null;
-    if (change) latest.current.onDrag(held.id, change);
-    setDraft(null);
+    if (change) latest.current.onDrag(gripped.id, change);
+    held.set(null);
+    setHeldId(null);
   };
 
   /** For the board, which hears what the captured pulley does. */
   const handlers = {
     onPointerMove: (event: PointerEvent) => {
-      const held = grip.current;
-      if (!held) return;
-      const [dx, dy] = [event.clientX - held.fromX, event.clientY - held.fromY];
-      const step = stepOf(held.scale);
+      const gripped = grip.current;
+      if (!gripped) return;
+      const [dx, dy] = [event.clientX - gripped.fromX, event.clientY - gripped.fromY];
+      const step = stepOf(gripped.scale);
       const stepped = (mm: number) => Math.round(mm / step) * step;
-      const { x, y, diameter } = held.pulley;
-      next.current = held.isRim
-        ? { diameter: Math.max(step, stepped(diameter + (2 * dx) / held.scale)) }
-        : { x: stepped(x + dx / held.scale), y: stepped(y - dy / held.scale) };
+      const { x, y, diameter } = gripped.pulley;
+      next.current = gripped.isRim
+        ? { diameter: Math.max(step, stepped(diameter + (2 * dx) / gripped.scale)) }
+        : { x: stepped(x + dx / gripped.scale), y: stepped(y - dy / gripped.scale) };
       frame.current ||= requestAnimationFrame(draw);
     },
     onPointerUp: release,
@@ -83,5 +86,5 @@ export function usePulleyDrag(
 
   const hold = useRef((event: PointerEvent<Element>, id: number) => begin(event, id, false)).current;
   const holdRim = useRef((event: PointerEvent<Element>, id: number) => begin(event, id, true)).current;
-  return { draft, hold, holdRim, handlers };
+  return { held, heldId, hold, holdRim, handlers };
 }

@@ -135,8 +135,8 @@ describe("the belt route gauge", () => {
     expect(Object.fromEntries(query)).toEqual({
       kind: "flat-belt",
       insideCircumference: `${((low + high) / 2).toFixed(1)} ± ${((high - low) / 2).toFixed(1)} mm`,
-      width: "4 mm",
-      thickness: "1 mm",
+      width: "4 ± 0.2 mm",
+      thickness: "1 ± 0.1 mm",
       condition: "missing",
       family: "test-family",
       shipTo: "NO",
@@ -144,6 +144,12 @@ describe("the belt route gauge", () => {
     });
     await user.click(link);
     expect(screen.getByText("Results")).toBeVisible();
+  });
+
+  it("takes what the search knew of the belt, written in any of its ways", () => {
+    open(`${two.replace("1+mm", "1.2+%C2%B1+0.1+mm")}&width=4.1+mm;+3.9+mm`);
+    expect(screen.getByLabelText("Thickness")).toHaveValue("1.2 mm");
+    expect(screen.getByLabelText("Width")).toHaveValue("4 mm");
   });
 
   it("offers the published stretches of round belts with their sources, an O-ring's counted on its inside", async () => {
