@@ -1,10 +1,11 @@
 import type { ReactNode } from "react";
+import { PictureChoice } from "../PictureChoice";
 import type { SheetKind } from "./sheetsState";
 
-const choices: readonly { sheet: SheetKind; name: string; words: string }[] = [
-  { sheet: "strobe", name: "Stroboscope disc", words: "is it turning at its speed?" },
-  { sheet: "ring-gauge", name: "Ring gauge", words: "diameters of wheels and bores" },
-  { sheet: "belt-ruler", name: "Belt ruler", words: "around the inside, at a glance" },
+const choices: readonly { value: SheetKind; name: string; words: string }[] = [
+  { value: "strobe", name: "Stroboscope disc", words: "is it turning at its speed?" },
+  { value: "ring-gauge", name: "Ring gauge", words: "diameters of wheels and bores" },
+  { value: "belt-ruler", name: "Belt ruler", words: "around the inside, at a glance" },
 ];
 
 const thin = { stroke: "var(--color-ink)", strokeWidth: 1.2, fill: "none" };
@@ -37,36 +38,21 @@ const sketches: Record<SheetKind, ReactNode> = {
 /** Which sheet: three small drawings to choose from. */
 export function SheetChooser({ sheet, onSheet }: { sheet: SheetKind; onSheet: (sheet: SheetKind) => void }) {
   return (
-    <fieldset className="mb-4 print:hidden">
-      <legend className="sr-only">The sheet</legend>
-      <div className="grid grid-cols-3 gap-2">
-        {choices.map((choice) => (
-          <label
-            key={choice.sheet}
-            className="grid cursor-pointer content-start justify-items-start border border-edge bg-sheet px-2 py-2 has-checked:border-measured has-checked:outline-1 has-checked:outline-measured has-focus-visible:outline-2 has-focus-visible:outline-focus"
-          >
-            <input
-              type="radio"
-              name="sheet"
-              value={choice.sheet}
-              checked={choice.sheet === sheet}
-              onChange={() => onSheet(choice.sheet)}
-              className="sr-only"
-            />
-            <svg viewBox="0 0 96 56" aria-hidden="true" className="mb-1 w-24 max-w-full">
-              {sketches[choice.sheet]}
-            </svg>
-            <span
-              className={
-                choice.sheet === sheet ? "font-bold text-measured max-sm:text-small" : "font-semibold max-sm:text-small"
-              }
-            >
-              {choice.name}
-            </span>
-            <span className="text-small text-soft max-sm:hidden">{choice.words}</span>
-          </label>
-        ))}
-      </div>
-    </fieldset>
+    <PictureChoice
+      legend="The sheet"
+      name="sheet"
+      value={sheet}
+      onChoose={onSheet}
+      columns="sm:grid-cols-3"
+      isListOnPhone
+      choices={choices.map((choice) => ({
+        ...choice,
+        picture: (
+          <svg viewBox="0 0 96 56" aria-hidden="true" className="w-24 max-w-full">
+            {sketches[choice.value]}
+          </svg>
+        ),
+      }))}
+    />
   );
 }

@@ -1,38 +1,24 @@
+import { PictureChoice } from "../PictureChoice";
 import type { Drive } from "./speedState";
 
-const choices: readonly { drive: Drive; name: string; words: string }[] = [
-  { drive: "rim", name: "Rim drive", words: "a plain idler between motor and rim" },
-  { drive: "stepped-idler", name: "Stepped idler", words: "two treads on one hub" },
-  { drive: "belt", name: "Belt drive", words: "a belt to the platter" },
-  { drive: "capstan", name: "Capstan", words: "a tape moved by a shaft" },
+const choices: readonly { value: Drive; name: string; words: string }[] = [
+  { value: "rim", name: "Rim drive", words: "a plain idler between motor and rim" },
+  { value: "stepped-idler", name: "Stepped idler", words: "two treads on one hub" },
+  { value: "belt", name: "Belt drive", words: "a belt to the platter" },
+  { value: "capstan", name: "Capstan", words: "a tape moved by a shaft" },
 ];
 
 /** Which drive: four small drawings to choose from. */
 export function DriveChooser({ drive, onDrive }: { drive: Drive; onDrive: (drive: Drive) => void }) {
   return (
-    <fieldset className="mb-4 print:hidden">
-      <legend className="sr-only">The drive</legend>
-      <div className="grid grid-cols-2 gap-2 sm:grid-cols-4">
-        {choices.map((choice) => (
-          <label
-            key={choice.drive}
-            className="grid cursor-pointer content-start justify-items-start border border-edge bg-sheet px-3 py-2 has-checked:border-measured has-checked:outline-1 has-checked:outline-measured has-focus-visible:outline-2 has-focus-visible:outline-focus"
-          >
-            <input
-              type="radio"
-              name="drive"
-              value={choice.drive}
-              checked={choice.drive === drive}
-              onChange={() => onDrive(choice.drive)}
-              className="sr-only"
-            />
-            <DriveSketch drive={choice.drive} />
-            <span className={choice.drive === drive ? "font-bold text-measured" : "font-semibold"}>{choice.name}</span>
-            <span className="text-small text-soft">{choice.words}</span>
-          </label>
-        ))}
-      </div>
-    </fieldset>
+    <PictureChoice
+      legend="The drive"
+      name="drive"
+      value={drive}
+      onChoose={onDrive}
+      columns="grid-cols-2 sm:grid-cols-4"
+      choices={choices.map((choice) => ({ ...choice, picture: <DriveSketch drive={choice.value} /> }))}
+    />
   );
 }
 
@@ -43,7 +29,7 @@ const belt = { ...ink, strokeWidth: 2.4 };
 
 function DriveSketch({ drive }: { drive: Drive }) {
   return (
-    <svg width="96" height="56" viewBox="0 0 96 56" aria-hidden="true" className="mb-1">
+    <svg width="96" height="56" viewBox="0 0 96 56" aria-hidden="true">
       {sketches[drive]}
     </svg>
   );
