@@ -1,4 +1,4 @@
-import { type KeyboardEvent, useCallback, useMemo, useRef } from "react";
+import { type CSSProperties, type KeyboardEvent, useCallback, useMemo, useRef } from "react";
 import { roundedSize, type SizeUnit } from "../../../lib/formatSize";
 import { Button } from "../../../ui/Button";
 import { useOwnWidth } from "../../../ui/drawing/useOwnWidth";
@@ -33,6 +33,9 @@ const arrows: Record<string, readonly [number, number]> = {
   ArrowDown: [0, -1],
 };
 
+/** Above and below the drawing, px. */
+const borders = 2;
+
 /** The drawing with what its pulleys are dragged by; each is reached by Tab and moved with the arrow keys. */
 export function BeltBoard(props: Props) {
   const { state, solved, unit, drawn, selectedId, onSelect, onChange } = props;
@@ -46,7 +49,7 @@ export function BeltBoard(props: Props) {
     (id: number, change: Partial<NamedPulley>) => latest.current.onChange(id, change, false),
     [],
   );
-  const { held, heldId, hold, holdRim, handlers } = usePulleyDrag(state.pulleys, scale, onDrag);
+  const { held, heldId, hold, holdRim, handlers } = usePulleyDrag(state.pulleys, scale, onDrag, place);
   const { pulleys } = state;
   const { route, thicknessMm, refusal } = solved;
   const { good } = useLastGood(thicknessMm);
@@ -73,7 +76,8 @@ export function BeltBoard(props: Props) {
         ref={place}
         role="application"
         aria-label="Board. Arrow keys move a pulley by 1 mm, with Shift by 10 mm, with Alt by 0.1 mm."
-        className="belt-board gauge-sheet relative mt-2 overflow-hidden"
+        className={`belt-board gauge-sheet relative mt-2 overflow-hidden ${heldId === null ? "" : "belt-dragging"}`}
+        style={{ "--board-height": `${height + borders}px` } as CSSProperties}
         {...handlers}
       >
         <div className="belt-sheets">
@@ -88,6 +92,7 @@ export function BeltBoard(props: Props) {
           />
           <BoardMoving held={held} state={state} solved={solved} unit={unit} view={view} board={board} />
           <BoardWords
+            isPale={heldId !== null}
             pulleys={pulleys}
             route={route}
             selectedId={selectedId}
@@ -101,7 +106,6 @@ export function BeltBoard(props: Props) {
           <PulleyHandle
             key={pulley.id}
             pulley={pulley}
-            held={held}
             view={view}
             words={`${pulleyName(pulley, i)}: x ${sizeOf(pulley.x)}, y ${sizeOf(pulley.y)}, ${sizeOf(pulley.diameter)} across`}
             isSelected={pulley.id === selectedId}
@@ -113,7 +117,6 @@ export function BeltBoard(props: Props) {
         {chosen && (
           <RimHandle
             pulley={chosen}
-            held={held}
             view={view}
             name={pulleyName(chosen, selected)}
             onHold={holdRim}

@@ -13,13 +13,13 @@ export function BeltLine({ route, thickness, view, isStale }: Props) {
   if (isStale) {
     const dash = `${6 / scale} ${5 / scale}`;
     return (
-      <g transform={transform} opacity={0.5}>
+      <g className="belt-line" transform={transform} opacity={0.5}>
         <path d={path} fill="none" stroke="var(--color-soft)" strokeWidth={2 / scale} strokeDasharray={dash} />
       </g>
     );
   }
   return (
-    <g transform={transform} fill="none" strokeLinejoin="round">
+    <g className="belt-line" transform={transform} fill="none" strokeLinejoin="round">
       <path d={path} stroke="var(--color-ink)" strokeWidth={width + 1.2 / scale} />
       <path d={path} stroke="var(--color-rubber)" strokeWidth={width} />
     </g>

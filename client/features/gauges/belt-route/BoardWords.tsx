@@ -9,6 +9,8 @@ import { type Board, toPx, type View } from "./boardView";
 import { rimHandleBox } from "./rimHandleBox";
 
 type Props = {
+  /** While a pulley is held they lag behind it. */
+  isPale: boolean;
   pulleys: readonly NamedPulley[];
   /** Null where the belt does not close. */
   route: BeltRoute | null;
@@ -22,7 +24,7 @@ type Props = {
 
 /** Names, wraps and lengths, each where there is room for it. */
 export const BoardWords = memo(function BoardWords(props: Props) {
-  const { pulleys, route, selectedId, thickness, unit, view, board } = props;
+  const { isPale, pulleys, route, selectedId, thickness, unit, view, board } = props;
   const spanWords = route ? route.spansMm.map((mm) => (unit === "mm" ? mm.toFixed(1) : roundedSize(mm, unit))) : [];
   const chosen = pulleys.find(({ id }) => id === selectedId);
   const taken = chosen ? [rimHandleBox(toPx(view, chosen), (chosen.diameter / 2) * view.scale)] : [];
@@ -32,7 +34,7 @@ export const BoardWords = memo(function BoardWords(props: Props) {
   const indexOf = new Map(pulleys.map(({ id }, i) => [id, i]));
   return (
     <BoardSheet board={board}>
-      <g fontSize={13} textAnchor="middle">
+      <g fontSize={13} textAnchor="middle" fillOpacity={isPale ? 0.5 : 1}>
         {labels.spans.map(({ id, x, y }) => (
           <BoardLabel key={id} x={x} y={y} soft={spanWords[indexOf.get(id) ?? 0] ?? ""} />
         ))}

@@ -1,11 +1,9 @@
 import { type KeyboardEvent, memo, type PointerEvent } from "react";
 import type { NamedPulley } from "./beltState";
 import { toPx, type View } from "./boardView";
-import { type HeldPulley, useFollowed } from "./heldPulley";
 
 type Props = {
   pulley: NamedPulley;
-  held: HeldPulley;
   view: View;
   /** Read out when it has the focus: name, place, size. */
   words: string;
@@ -15,10 +13,12 @@ type Props = {
   onSelect: (id: number) => void;
 };
 
-/** What a pulley is dragged by, and moved with the arrow keys: lies over it, at least as large as a fingertip. */
+/**
+ * What a pulley is dragged by, and moved with the arrow keys: lies over it, at least as large as a fingertip. While it is
+ * held it waits, unseen, until the pulley rests.
+ */
 export const PulleyHandle = memo(function PulleyHandle(props: Props) {
-  const { held, view, words, isSelected, onHold, onKey, onSelect } = props;
-  const pulley = useFollowed(held, props.pulley);
+  const { pulley, view, words, isSelected, onHold, onKey, onSelect } = props;
   const { id } = pulley;
   const { x, y } = toPx(view, pulley);
   const reach = Math.max((pulley.diameter / 2) * view.scale, 22);

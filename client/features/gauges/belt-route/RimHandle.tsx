@@ -2,13 +2,11 @@ import type { KeyboardEvent, PointerEvent } from "react";
 import { beltRouteLimits } from "#shared/domain/beltRoute";
 import type { NamedPulley } from "./beltState";
 import { toPx, type View } from "./boardView";
-import { type HeldPulley, useFollowed } from "./heldPulley";
 import { keyStep } from "./keyStep";
 import { rimHandleBox } from "./rimHandleBox";
 
 type Props = {
   pulley: NamedPulley;
-  held: HeldPulley;
   view: View;
   name: string;
   onHold: (event: PointerEvent<Element>, id: number) => void;
@@ -16,8 +14,7 @@ type Props = {
 };
 
 /** On the right of the chosen pulley: its diameter, to be dragged wider or set with the arrow keys. */
-export function RimHandle({ held, view, name, onHold, onDiameter, ...rest }: Props) {
-  const pulley = useFollowed(held, rest.pulley);
+export function RimHandle({ pulley, view, name, onHold, onDiameter }: Props) {
   const { id, diameter } = pulley;
   const box = rimHandleBox(toPx(view, pulley), (diameter / 2) * view.scale);
   const onKeyDown = (event: KeyboardEvent) => {

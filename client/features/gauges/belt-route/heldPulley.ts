@@ -1,7 +1,6 @@
-import { useSyncExternalStore } from "react";
 import type { NamedPulley } from "./beltState";
 
-/** The pulley that is being dragged, as it lies in this frame; told to the few things that follow it. */
+/** The pulley that is being dragged, as it lies in this frame; told to what follows it. */
 export type HeldPulley = {
   get: () => NamedPulley | null;
   set: (pulley: NamedPulley | null) => void;
@@ -23,12 +22,3 @@ export function createHeldPulley(): HeldPulley {
     },
   };
 }
-
-export const useHeldPulley = (held: HeldPulley): NamedPulley | null => useSyncExternalStore(held.subscribe, held.get);
-
-/** The pulley, or what it has become under the finger. */
-export const useFollowed = (held: HeldPulley, pulley: NamedPulley): NamedPulley =>
-  useSyncExternalStore(held.subscribe, () => {
-    const now = held.get();
-    return now?.id === pulley.id ? now : pulley;
-  });
