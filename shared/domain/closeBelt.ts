@@ -81,7 +81,10 @@ function without(pulleys: readonly Pulley[], thickness: number, [sense, other]: 
  */
 export function closeBelt(pulleys: readonly Pulley[], thickness: number): { contacts: Contact[]; isCrossed: boolean } {
   const senses = sensesOf(pulleys);
-  const [given, other] = senses.map((sense) => attempt(pulleys, thickness, sense));
+  const given = attempt(pulleys, thickness, senses[0]);
+  // As a rule this is all; a belt that is dragged is worked out in every frame.
+  if (given && closesCleanly(given)) return { contacts: given.contacts, isCrossed: false };
+  const other = attempt(pulleys, thickness, senses[1]);
   const tries = [given, other].filter((tried) => tried !== undefined);
   // Round an idler that hangs free, the wrong sense adds up to one turn too, by looping through itself: hence clean ones.
   const good = tries.find(closesCleanly) ?? (given?.turns === 1 ? given : undefined);
