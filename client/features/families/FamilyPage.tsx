@@ -1,6 +1,6 @@
 import { useQuery } from "@tanstack/react-query";
 import { useState } from "react";
-import { useParams } from "react-router-dom";
+import { Link, useParams } from "react-router-dom";
 import type { FamilyPage as Answer } from "#shared/schemas/catalogue";
 import { ApiProblem } from "../../lib/ApiProblem";
 import { useTitle } from "../../lib/useTitle";
@@ -9,6 +9,7 @@ import { Notice } from "../../ui/Notice";
 import { RuledHeading } from "../../ui/RuledHeading";
 import { Skeleton } from "../../ui/Skeleton";
 import { familyQuery } from "./api";
+import { beltRouteAddress } from "./beltRouteAddress";
 import { DriveMapDrawing } from "./DriveMapDrawing";
 import { mechanismWords } from "./mechanismWords";
 import { ServicePointItem, servicePointId } from "./ServicePointItem";
@@ -45,6 +46,25 @@ export function FamilyPage() {
   );
 }
 
+/** From each belt of the plan to the gauge that works out its length. */
+function BeltsOnBoard({ family: { driveMap, servicePoints, slug } }: { family: Answer }) {
+  const belts = driveMap.belts.flatMap(({ label }) => {
+    const to = beltRouteAddress(driveMap, label, servicePoints, slug);
+    return to ? [{ label, to }] : [];
+  });
+  if (belts.length === 0) return null;
+  return (
+    <p className="mt-2 flex flex-wrap gap-x-4 print:hidden">
+      <span className="text-soft">Lay out the pulleys of</span>
+      {belts.map(({ label, to }) => (
+        <Link key={label} to={to}>
+          the {label}
+        </Link>
+      ))}
+    </p>
+  );
+}
+
 function Family({ family }: { family: Answer }) {
   const [litId, setLit] = useState<string | null>(null);
   const { name, maker, kind, models, about, driveTrain, driveMap, servicePoints, slug } = family;
@@ -69,6 +89,7 @@ function Family({ family }: { family: Answer }) {
           <div className="mt-3 border border-rule bg-sheet">
             <DriveMapDrawing map={driveMap} points={servicePoints} litId={litId} onLight={setLit} onPick={goTo} />
           </div>
+          <BeltsOnBoard family={family} />
         </section>
         <section className="points">
           <RuledHeading className="mt-6">{`Service points: ${servicePoints.length}`}</RuledHeading>
