@@ -10,16 +10,15 @@ import { answered, casesOf, expectNear, type Figures } from "./referenceCases";
 
 /*
  * The reference cases once more, through the interface. tests/shared/domain holds all of them to the functions; here are
- * those that a call can express (belts and speeds in the
- * two files beside this one). Sources and status (verified, derived, from memory) stand beside each case in its file.
+ * those that a call can express (belts and speeds in the two files beside this one). Sources and status (verified, derived, from memory) stand beside each case in its file.
  *
  * Through functions only, since no call asks or answers them:
  *   open-08                      solves for the centre distance (here: its answer is asked, its length comes back)
- *   size-03, size-08, sg-01..04  stretch from two sizes, expanded uncertainties, advice
+ *   size-08, sg-01..04           expanded uncertainties, advice
  *   motor-06, motor-07, rim-03, rim-05, rim-06, bdrive-05, capstan-04      solve for slip or for a size
  *   err-03, err-04, err-05, err-07, err-08, nom-01..03, lim-01..07         errors against speeds that are no target; limits
  *   strobe-09, strobe-11, strobe-12, strobe-10 (400 bars)                  a ring of another count, creeping bars
- *   iso-13..15                   classes for extruded and cut parts
+ *   iso-13..15                   classes for extruded and cut parts, which the product does not have
  *   as568-14, as568-15, ostr-02..05, o3601-01..05                          the table itself, loss of section, ISO 3601-1
  *   conf-08, all of uncertainty, instrument_mpe, hardness, set_and_relaxation, currency_minor_units, allocation
  *   unit-09..12                  tape speeds, wire gauges, nearest fractions
