@@ -10,7 +10,8 @@ import { answered, casesOf, expectNear, type Figures } from "./referenceCases";
 
 /*
  * The reference cases once more, through the interface. tests/shared/domain holds all of them to the functions; here are
- * those that a call can express (belts and speeds in the two files beside this one). Sources and status (verified, derived, from memory) stand beside each case in its file.
+ * those that a call can express (belts and speeds in the two files beside this one). Sources and status (verified, derived,
+ * from memory) stand beside each case in its file.
  *
  * Through functions only, since no call asks or answers them:
  *   open-08                      solves for the centre distance (here: its answer is asked, its length comes back)
