@@ -42,6 +42,12 @@ const BasketPage = lazy(async () => ({ default: (await import("../features/baske
 const CheckoutPage = lazy(async () => ({ default: (await import("../features/basket/CheckoutPage")).CheckoutPage }));
 const OrdersPage = lazy(async () => ({ default: (await import("../features/orders/OrdersPage")).OrdersPage }));
 const OrderPage = lazy(async () => ({ default: (await import("../features/orders/OrderPage")).OrderPage }));
+const WorkshopOrdersPage = lazy(async () => ({
+  default: (await import("../features/workshop-orders/WorkshopOrdersPage")).WorkshopOrdersPage,
+}));
+const WorkshopParcelPage = lazy(async () => ({
+  default: (await import("../features/workshop-orders/WorkshopParcelPage")).WorkshopParcelPage,
+}));
 const SpeedPage = lazy(async () => ({ default: (await import("../features/gauges/speed/SpeedPage")).SpeedPage }));
 const BeltSamplePage = lazy(async () => ({
   default: (await import("../features/gauges/belt-sample/BeltSamplePage")).BeltSamplePage,
@@ -95,6 +101,8 @@ export function AppRoutes() {
           <Route path="checkout" element={<CheckoutPage sendVerification={<SendVerification />} />} />
           <Route path="orders" element={<OrdersPage />} />
           <Route path="orders/:id" element={<OrderPage />} />
+          <Route path="workshop/orders" element={<WorkshopOrdersPage />} />
+          <Route path="workshop/orders/:id" element={<WorkshopParcelPage />} />
         </Route>
         <Route path="*" element={<NotFoundPage />} />
       </Route>

@@ -25,7 +25,7 @@ export const offerNames: Record<PartSummary["offerType"], string> = {
 };
 
 /** "CR, 50 Shore A". */
-export function materialWords({ material, hardnessShoreA }: PartSummary): string {
+export function materialWords({ material, hardnessShoreA }: Pick<PartSummary, "material" | "hardnessShoreA">): string {
   const words = material === "natural-rubber" ? "natural rubber" : material;
   return [words, hardnessShoreA === null ? null : `${hardnessShoreA} Shore A`].filter(Boolean).join(", ");
 }

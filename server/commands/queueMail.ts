@@ -10,6 +10,7 @@ export type MailPayloads = {
   "address-in-use": { displayName: string; url: string };
   "order-confirmation": { orderId: string };
   "new-order": { parcelId: string };
+  "parcel-dispatched": { parcelId: string };
   "order-refunded": { orderId: string; reason: string };
 };
 

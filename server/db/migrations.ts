@@ -8,6 +8,7 @@ import { ledger } from "./migrations/0006-ledger";
 import { mails } from "./migrations/0007-mails";
 import { searchVocabulary } from "./migrations/0008-search-vocabulary";
 import { itemSizes } from "./migrations/0009-item-sizes";
+import { parcelDispatch } from "./migrations/0011-parcel-dispatch";
 
 /** Every migration, oldest first. */
 export const migrations: readonly Migration[] = [
@@ -20,4 +21,5 @@ export const migrations: readonly Migration[] = [
   mails,
   searchVocabulary,
   itemSizes,
+  parcelDispatch,
 ];

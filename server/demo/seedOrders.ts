@@ -67,6 +67,9 @@ function partsFor(plan: Plan, n: number, parts: readonly Part[]): Part[] {
   return chosen;
 }
 
+/** Parcels that have left; the demo's leave on the last day. */
+const gone: readonly ParcelState[] = ["dispatched", "delivered", "closed"];
+
 const history: Partial<Record<OrderState, string>> = {
   paid: "order-paid",
   closed: "order-paid",
@@ -90,7 +93,9 @@ async function settle(
     const index = bought.findIndex(({ workshopId }) => workshopId === parcel.workshopId);
     const paid = plan.state === "paid" || plan.state === "closed";
     const leavesBy = paid ? new Date(at.getTime() + parcel.leavesInDays * dayMs) : null;
-    await parcel.update({ state: plan.parcels[index] ?? "to-accept", leavesBy }, { transaction });
+    const state = plan.parcels[index] ?? "to-accept";
+    const dispatchedAt = gone.includes(state) ? leavesBy : null;
+    await parcel.update({ state, leavesBy, dispatchedAt }, { transaction });
   }
   if (plan.state === "awaiting-payment") {
     await addJob("expireOrder", { orderId: order.id }, transaction, {

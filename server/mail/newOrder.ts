@@ -22,7 +22,7 @@ export async function newOrder(parcelId: string, { config, logger }: Services): 
         parcel.leavesBy ? ` by ${dayInWords(parcel.leavesBy)}` : ""
       }.`,
     ],
-    action: { label: `See order ${number}`, url: `${config.publicUrl}/orders/${order.id}` },
+    action: { label: `See order ${number}`, url: `${config.publicUrl}/workshop/orders/${parcelId}` },
     blocks: [
       { heading: "To make and pack" },
       ...(await lineBlocks(lines, { currency, logger, madeToSize: "Made to the buyer's size" })),

@@ -5,6 +5,7 @@ import type { Letter } from "./Letter";
 import { newOrder } from "./newOrder";
 import { orderConfirmation } from "./orderConfirmation";
 import { orderRefunded } from "./orderRefunded";
+import { parcelDispatched } from "./parcelDispatched";
 
 type Writer<Name extends keyof MailPayloads> = (
   payload: MailPayloads[Name],
@@ -18,6 +19,7 @@ const writers: { [Name in keyof MailPayloads]: Writer<Name> } = {
   "address-in-use": addressInUseLetter,
   "order-confirmation": ({ orderId }, services) => orderConfirmation(orderId, services),
   "new-order": ({ parcelId }, services) => newOrder(parcelId, services),
+  "parcel-dispatched": ({ parcelId }, services) => parcelDispatched(parcelId, services),
   "order-refunded": ({ orderId, reason }, services) => orderRefunded(orderId, reason, services),
 };
 

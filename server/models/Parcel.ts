@@ -24,6 +24,9 @@ export class Parcel extends Model<InferAttributes<Parcel>, InferCreationAttribut
   declare commissionMinor: number;
   declare leavesInDays: number;
   declare leavesBy: CreationOptional<Date | null>;
+  declare carrier: CreationOptional<string | null>;
+  declare trackingNumber: CreationOptional<string | null>;
+  declare dispatchedAt: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
 }
@@ -44,6 +47,9 @@ export function initParcel(sequelize: Sequelize): void {
       commissionMinor: DataTypes.BIGINT,
       leavesInDays: DataTypes.INTEGER,
       leavesBy: DataTypes.DATE,
+      carrier: DataTypes.TEXT,
+      trackingNumber: DataTypes.TEXT,
+      dispatchedAt: DataTypes.DATE,
       createdAt: DataTypes.DATE,
       updatedAt: DataTypes.DATE,
     },

@@ -9,6 +9,7 @@ import type { Workshop } from "../models/Workshop";
 import { readParcels } from "../orders/readParcels";
 import type { Actor } from "../policies/Actor";
 import { orderPolicy } from "../policies/orderPolicy";
+import { presentOrderLine } from "./presentOrderLine";
 import { presentWorkshop } from "./presentWorkshop";
 
 const time = (at: Date | null) => at?.toISOString() ?? null;
@@ -26,12 +27,6 @@ const historyWords: Record<string, string> = {
   "payment-mismatch": "A payment does not match this order; we are looking into it",
 };
 
-function presentLine(line: OrderLine) {
-  const { id, partId, title, forNeed, quantity, unitMinor, lineMinor, taxMinor, madeToSize } = line;
-  const { kind, dimensions } = line.listing;
-  return { id, partId, title, kind, dimensions, forNeed, quantity, unitMinor, lineMinor, taxMinor, madeToSize };
-}
-
 function presentParcel(parcel: Parcel, lines: readonly OrderLine[], workshop: Workshop): OrderParcel {
   const { id, state, trader, partsMinor, shippingMinor, taxMinor, totalMinor } = parcel;
   return {
@@ -39,13 +34,16 @@ function presentParcel(parcel: Parcel, lines: readonly OrderLine[], workshop: Wo
     state,
     workshop: presentWorkshop(workshop),
     trader,
-    lines: lines.filter(({ parcelId }) => parcelId === id).map(presentLine),
+    lines: lines.filter(({ parcelId }) => parcelId === id).map(presentOrderLine),
     partsMinor,
     shippingMinor,
     taxMinor,
     taxRatePercent: parcel.taxRateBasisPoints / 100,
     totalMinor,
     leavesBy: time(parcel.leavesBy),
+    dispatchedAt: time(parcel.dispatchedAt),
+    carrier: parcel.carrier,
+    trackingNumber: parcel.trackingNumber,
   };
 }
 

@@ -12,6 +12,7 @@ import { orderRoutes } from "./orders";
 import { partRoutes } from "./parts";
 import { searchRoutes } from "./search";
 import { sheetRoutes } from "./sheets";
+import { workshopParcelRoutes } from "./workshopParcels";
 import { workshopRoutes } from "./workshops";
 
 /** Every call of the interface. One that is not listed here is neither served nor described. */
@@ -25,6 +26,7 @@ export function endpointsOf(services: Services): Endpoint[] {
     ...countryRoutes(),
     ...basketRoutes(),
     ...orderRoutes(services),
+    ...workshopParcelRoutes(),
     ...addressRoutes(),
     ...gaugeRoutes(),
     ...driveGaugeRoutes(),

@@ -34,3 +34,28 @@ const next: Record<ParcelState, readonly ParcelState[]> = {
 };
 
 export const parcelMayBecome = (from: ParcelState, to: ParcelState): boolean => next[from].includes(to);
+
+/** A parcel as a sentence says it: "This parcel is in work". */
+export const parcelStateSaid: Record<ParcelState, string> = {
+  "to-accept": "not accepted yet",
+  "core-awaited": "waiting for its core",
+  "core-received": "waiting for its core to be looked at",
+  "core-refused": "waiting for another core",
+  "in-work": "in work",
+  ready: "ready",
+  dispatched: "dispatched",
+  delivered: "delivered",
+  closed: "closed",
+  declined: "declined",
+  cancelled: "cancelled",
+};
+
+/** Parcels that have not left yet and still will. */
+export const openParcelStates = [
+  "to-accept",
+  "core-awaited",
+  "core-received",
+  "core-refused",
+  "in-work",
+  "ready",
+] as const satisfies readonly ParcelState[];

@@ -71,6 +71,9 @@ export const OrderParcel = z.object({
   taxRatePercent: z.number(),
   totalMinor: Minor,
   leavesBy: Time.nullable(),
+  dispatchedAt: Time.nullable(),
+  carrier: z.string().nullable(),
+  trackingNumber: z.string().nullable(),
 });
 export type OrderParcel = z.infer<typeof OrderParcel>;
 

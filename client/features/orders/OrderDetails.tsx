@@ -1,6 +1,6 @@
-import { countryName } from "#shared/domain/countries";
-import type { Address, Order } from "#shared/schemas/order";
+import type { Order } from "#shared/schemas/order";
 import { allTaxWords } from "../../lib/taxWords";
+import { AddressLines } from "../../ui/AddressLines";
 import { Money } from "../../ui/Money";
 import { RuledHeading } from "../../ui/RuledHeading";
 import { TitleBlock, type TitleCell } from "../../ui/TitleBlock";
@@ -24,23 +24,6 @@ export function OrderSums({ order }: { order: Order }) {
         ]}
       />
     </section>
-  );
-}
-
-function AddressLines({ label, address }: { label: string; address: Address }) {
-  const { name, line1, line2, postcode, town, region, country } = address;
-  const lines = [name, line1, line2, `${postcode} ${town}`, region, countryName(country)].filter(Boolean);
-  return (
-    <div>
-      <h3 className="text-small font-normal text-soft">{label}</h3>
-      <address className="not-italic">
-        {lines.map((line) => (
-          <span key={line} className="block">
-            {line}
-          </span>
-        ))}
-      </address>
-    </div>
   );
 }
 

@@ -16,6 +16,15 @@ import { TraderLines } from "./TraderLines";
 export const drawnLine = ({ kind, dimensions }: OrderLine): Drawable | null =>
   kind === "rebuild-kit" ? null : { kind, dims: dimensions };
 
+/** "Left on 3 December 2026, carried by Harbour Post, tracking number HP 12". */
+function dispatchWords(dispatchedAt: string, { carrier, trackingNumber }: OrderParcel): string {
+  return [
+    `Left on ${formatDay(dispatchedAt)}`,
+    ...(carrier ? [`carried by ${carrier}`] : []),
+    ...(trackingNumber ? [`tracking number ${trackingNumber}`] : []),
+  ].join(", ");
+}
+
 type Props = {
   parcel: OrderParcel;
   label: string;
@@ -27,7 +36,7 @@ type Props = {
 
 /** One workshop's parcel of an order, with everything as it was bought. */
 export function OrderParcelSection({ parcel, label, currency, scale, isPaid }: Props) {
-  const { workshop, lines, trader, leavesBy, state } = parcel;
+  const { workshop, lines, trader, leavesBy, dispatchedAt, state } = parcel;
   return (
     <section>
       <RuledHeading>
@@ -39,11 +48,12 @@ export function OrderParcelSection({ parcel, label, currency, scale, isPaid }: P
           {workshop.name}
         </Link>
         , {workshop.town}, {workshop.countryName}
-        {isPaid && leavesBy && `; leaves by ${formatDay(leavesBy)}`}
+        {isPaid && leavesBy && !dispatchedAt && `; leaves by ${formatDay(leavesBy)}`}
       </p>
       {isPaid && (
         <div className="mt-4">
           <ParcelRail state={state} />
+          {dispatchedAt && <p className="[overflow-wrap:anywhere]">{dispatchWords(dispatchedAt, parcel)}.</p>}
         </div>
       )}
       <ul>

@@ -139,7 +139,8 @@ export const home = {
   country: "DE",
 };
 
-const { id: _, ...homeAddress } = home;
+const { id: _, ...withoutId } = home;
+export const homeAddress = withoutId;
 
 export function orderOf(more: Partial<Order> = {}): Order {
   const basket = twoParcels();
@@ -178,6 +179,9 @@ export function orderOf(more: Partial<Order> = {}): Order {
         madeToSize: line.madeToSize,
       })),
       leavesBy: "2026-12-03T12:30:00.000Z",
+      dispatchedAt: null,
+      carrier: null,
+      trackingNumber: null,
     })),
     partsMinor: basket.partsMinor,
     shippingMinor: basket.shippingMinor,

@@ -183,6 +183,23 @@ describe("an order that was paid", () => {
     expect(screen.queryByRole("button", { name: /Pay|Cancel/ })).toBeNull();
   });
 
+  it("says how a parcel that has left travels", async () => {
+    const order = paid();
+    Object.assign(order.parcels[0]!, {
+      state: "dispatched",
+      dispatchedAt: "2026-12-02T12:00:00.000Z",
+      carrier: "Harbour Post",
+      trackingNumber: "HP 12",
+    });
+    Object.assign(order.parcels[1]!, { state: "dispatched", dispatchedAt: "2026-12-02T12:00:00.000Z" });
+    stubApi(routes(() => order));
+    show();
+    expect(
+      await screen.findByText("Left on 2 December 2026, carried by Harbour Post, tracking number HP 12."),
+    ).toBeVisible();
+    expect(screen.getByText("Left on 2 December 2026.")).toBeVisible();
+  });
+
   it("says what was given back", async () => {
     stubApi(routes(() => ({ ...paid(), refundedMinor: 900 })));
     show();

@@ -1,9 +1,12 @@
+import type { Role } from "#shared/schemas/session";
+
 /**
  * Who may call what, by role (OWASP ASVS 5.0.0, 8.1.1). A call of the interface that is not listed fails the test.
  *
  * `open`: anybody. `own`: whoever is signed in, and what they reach is theirs alone, others' answering 404.
+ * A role: that role alone, others being told 403, and what it reaches is its own.
  */
-export const accessMatrix: Record<string, "open" | "own"> = {
+export const accessMatrix: Record<string, "open" | "own" | Role> = {
   "get /auth/session": "open",
   "post /auth/sign-up": "open",
   "post /auth/sign-in": "open",
@@ -48,4 +51,11 @@ export const accessMatrix: Record<string, "open" | "own"> = {
   "get /orders/:id": "own",
   "post /orders/:id/pay": "own",
   "post /orders/:id/cancel": "own",
+  "get /workshop/parcels": "workshop",
+  "get /workshop/parcels/:id": "workshop",
+  "post /workshop/parcels/:id/accept": "workshop",
+  "post /workshop/parcels/:id/core-received": "workshop",
+  "post /workshop/parcels/:id/start": "workshop",
+  "post /workshop/parcels/:id/ready": "workshop",
+  "post /workshop/parcels/:id/dispatch": "workshop",
 };
