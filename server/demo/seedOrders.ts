@@ -18,13 +18,22 @@ import { holdMs } from "../orders/holdLife";
 import { releaseStock, reserveStock, takeStock } from "../orders/stock";
 import { presentParts } from "../presenters/presentParts";
 import { idOf, pick } from "./dice";
-import { restorerNames, userId } from "./seedPeople";
+import { restorerNames, userId, workshopId } from "./seedPeople";
+import { demoWorkshops } from "./workshopData";
 
 const dayMs = 24 * 3_600_000;
 
-type Plan = { buyer: number; daysAgo: number; state: OrderState; parcels: readonly ParcelState[]; country: string };
+type Plan = {
+  buyer: number;
+  daysAgo: number;
+  state: OrderState;
+  parcels: readonly ParcelState[];
+  country: string;
+  /** Its first parcel is of the workshop whose account is given out. */
+  ofGivenWorkshop?: true;
+};
 
-/** One order of each sort that exists so far, most of them of the restorer whose account is given out. */
+/** One order of each sort that exists so far, many of them of the restorer or the workshop whose account is given out. */
 const plans: readonly Plan[] = [
   { buyer: 0, daysAgo: 41, state: "closed", parcels: ["closed", "closed"], country: "DE" },
   { buyer: 0, daysAgo: 16, state: "paid", parcels: ["delivered", "dispatched"], country: "DE" },
@@ -37,6 +46,11 @@ const plans: readonly Plan[] = [
   { buyer: 2, daysAgo: 30, state: "closed", parcels: ["closed"], country: "US" },
   { buyer: 3, daysAgo: 2, state: "paid", parcels: ["to-accept", "in-work"], country: "NL" },
   { buyer: 4, daysAgo: 5, state: "paid", parcels: ["core-received"], country: "SE" },
+  { buyer: 4, daysAgo: 0, state: "paid", parcels: ["to-accept"], country: "SE", ofGivenWorkshop: true },
+  { buyer: 3, daysAgo: 1, state: "paid", parcels: ["to-accept", "to-accept"], country: "NL", ofGivenWorkshop: true },
+  { buyer: 1, daysAgo: 7, state: "paid", parcels: ["core-awaited"], country: "NO", ofGivenWorkshop: true },
+  { buyer: 0, daysAgo: 4, state: "paid", parcels: ["in-work"], country: "DE", ofGivenWorkshop: true },
+  { buyer: 0, daysAgo: 1, state: "paid", parcels: ["ready", "in-work"], country: "DE", ofGivenWorkshop: true },
 ];
 
 const places: Record<string, [string, string, string]> = {
@@ -52,6 +66,9 @@ function addressOf(name: string, country: string): Address {
   return { name, line1, line2: "", postcode, town, region: "", country };
 }
 
+/** The first workshop's account is the one that is given out. */
+const givenWorkshop = workshopId(demoWorkshops[0]?.slug ?? "");
+
 /** One part for each parcel of a plan, each of another workshop, re-moulds where a core is spoken of. */
 function partsFor(plan: Plan, n: number, parts: readonly Part[]): Part[] {
   const chosen: Part[] = [];
@@ -59,7 +76,8 @@ function partsFor(plan: Plan, n: number, parts: readonly Part[]): Part[] {
     const remould = state.startsWith("core-");
     const open = parts.filter(
       (part) =>
-        !chosen.some(({ workshopId }) => workshopId === part.workshopId) &&
+        !chosen.some((one) => one.workshopId === part.workshopId) &&
+        (!plan.ofGivenWorkshop || index > 0 || part.workshopId === givenWorkshop) &&
         (remould ? part.offerType === "re-mould" : part.offerType === "stocked" && (part.stockOnHand ?? 0) > 3),
     );
     chosen.push(pick(open, "order", n, index));
