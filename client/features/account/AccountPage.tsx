@@ -45,6 +45,18 @@ export function AccountPage() {
               <SendVerification />
             </section>
           )}
+          {user.role === "workshop" && (
+            <section className="grid gap-3">
+              <RuledHeading>Your workshop</RuledHeading>
+              <ul className="grid gap-2">
+                <li>
+                  <Link to="/workshop/orders" className="inline-block min-h-6">
+                    Parcels to send
+                  </Link>
+                </li>
+              </ul>
+            </section>
+          )}
           <section className="grid gap-5">
             <RuledHeading>Password</RuledHeading>
             <ChangePasswordForm />

@@ -8,7 +8,7 @@ export function ParcelRow({ parcel }: { parcel: WorkshopParcelSummary }) {
   const { name, next } = workshopParcelWords[state];
   const due = dueOf(parcel, new Date());
   return (
-    <li className="relative grid gap-x-6 gap-y-2 border-b border-rule py-4 hover:bg-sheet md:grid-cols-[11rem_minmax(0,1fr)_minmax(0,1fr)]">
+    <li className="relative grid gap-x-6 gap-y-2 border-b border-rule py-4 hover:bg-sheet md:grid-cols-[14rem_minmax(0,1fr)_minmax(0,1fr)]">
       <div>
         <h2 className="text-base font-semibold">
           <Link to={`/workshop/orders/${id}`} className="inline-block min-h-6 after:absolute after:inset-0">

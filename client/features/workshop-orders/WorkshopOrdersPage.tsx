@@ -16,7 +16,7 @@ function ParcelsSkeleton() {
     <div role="status">
       <span className="sr-only">Fetching your workshop’s parcels</span>
       {[0, 1, 2].map((row) => (
-        <div key={row} className="grid gap-5 border-b border-rule py-4 md:grid-cols-[11rem_1fr_1fr]">
+        <div key={row} className="grid gap-5 border-b border-rule py-4 md:grid-cols-[14rem_1fr_1fr]">
           <Skeleton className="h-16 w-32" />
           <Skeleton className="h-16 w-full max-w-xs" />
           <Skeleton className="h-11 w-full max-w-sm" />
