@@ -8,6 +8,7 @@ export const problems = {
   "not-found": { status: 404, title: "There is nothing here" },
   "method-not-allowed": { status: 405, title: "This address does not do that" },
   "wrong-state": { status: 409, title: "Its state does not allow that now" },
+  "changed-meanwhile": { status: 409, title: "It was changed in another place" },
   "already-exists": { status: 409, title: "It is there already" },
   "out-of-stock": { status: 409, title: "Not enough of it is left" },
   "total-changed": { status: 409, title: "The total is no longer what you were shown" },

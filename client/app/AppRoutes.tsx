@@ -48,6 +48,9 @@ const WorkshopOrdersPage = lazy(async () => ({
 const WorkshopParcelPage = lazy(async () => ({
   default: (await import("../features/workshop-orders/WorkshopParcelPage")).WorkshopParcelPage,
 }));
+const WorkshopSettingsPage = lazy(async () => ({
+  default: (await import("../features/workshop-settings/WorkshopSettingsPage")).WorkshopSettingsPage,
+}));
 const SpeedPage = lazy(async () => ({ default: (await import("../features/gauges/speed/SpeedPage")).SpeedPage }));
 const BeltSamplePage = lazy(async () => ({
   default: (await import("../features/gauges/belt-sample/BeltSamplePage")).BeltSamplePage,
@@ -101,6 +104,7 @@ export function AppRoutes() {
           <Route path="checkout" element={<CheckoutPage sendVerification={<SendVerification />} />} />
           <Route path="orders" element={<OrdersPage />} />
           <Route path="orders/:id" element={<OrderPage />} />
+          <Route path="workshop/settings" element={<WorkshopSettingsPage />} />
           <Route path="workshop/orders" element={<WorkshopOrdersPage />} />
           <Route path="workshop/orders/:id" element={<WorkshopParcelPage />} />
         </Route>

@@ -13,6 +13,7 @@ import { partRoutes } from "./parts";
 import { searchRoutes } from "./search";
 import { sheetRoutes } from "./sheets";
 import { workshopParcelRoutes } from "./workshopParcels";
+import { workshopSettingsRoutes } from "./workshopSettings";
 import { workshopRoutes } from "./workshops";
 
 /** Every call of the interface. One that is not listed here is neither served nor described. */
@@ -23,6 +24,7 @@ export function endpointsOf(services: Services): Endpoint[] {
     ...partRoutes(),
     ...familyRoutes(services),
     ...workshopRoutes(),
+    ...workshopSettingsRoutes(),
     ...countryRoutes(),
     ...basketRoutes(),
     ...orderRoutes(services),

@@ -23,6 +23,8 @@ export const accessMatrix: Record<string, "open" | "own" | Role> = {
   "get /families/:slug": "open",
   "get /workshops": "open",
   "get /workshops/:slug": "open",
+  "get /workshop/settings": "workshop",
+  "put /workshop/settings": "workshop",
   "get /countries": "open",
   "get /basket": "open",
   "put /basket/lines/:partId": "open",
