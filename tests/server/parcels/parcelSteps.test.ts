@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { inTransaction } from "#server/db/inTransaction";
 import { AuditEntry } from "#server/models/AuditEntry";
 import { Mail } from "#server/models/Mail";
 import type { Parcel } from "#server/models/Parcel";
@@ -21,6 +22,12 @@ const trail = async ({ id }: Parcel) =>
     ({ action }) => action,
   );
 const at = (parcel: Parcel, step: string) => `/workshop/parcels/${parcel.id}/${step}`;
+const waitingForLocks = async () => {
+  const { rows } = await site.services.pool.query(
+    "SELECT count(*)::integer AS n FROM pg_stat_activity WHERE datname = current_database() AND wait_event_type = 'Lock'",
+  );
+  return rows[0].n;
+};
 const mailsTo = (address: string) => site.mail.messages().filter(({ envelope }) => envelope.to.includes(address));
 
 describe("the steps of a parcel", () => {
@@ -90,9 +97,16 @@ describe("the steps of a parcel", () => {
     expect(await trail(parcel)).toEqual([]);
   });
 
-  it("are taken once, however often and how soon they are sent", async () => {
+  it("are taken once by two that come at the same moment", async () => {
     const { owner, parcel } = await paidParcel(site);
-    const both = await Promise.all([owner.post(at(parcel, "accept")), owner.post(at(parcel, "accept"))]);
+    const sending = await inTransaction(async (transaction) => {
+      await parcel.reload({ transaction, lock: transaction.LOCK.UPDATE });
+      const both = [owner.post(at(parcel, "accept")), owner.post(at(parcel, "accept"))].map((call) => call.then());
+      // Both wait for the parcel before either writes.
+      await expect.poll(waitingForLocks).toBe(2);
+      return both;
+    });
+    const both = await Promise.all(sending);
     expect(both.map(({ status, body }) => [status, body.state])).toEqual([
       [200, "in-work"],
       [200, "in-work"],
