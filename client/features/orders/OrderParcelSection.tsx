@@ -37,6 +37,8 @@ type Props = {
 /** One workshop's parcel of an order, with everything as it was bought. */
 export function OrderParcelSection({ parcel, label, currency, scale, isPaid }: Props) {
   const { workshop, lines, trader, leavesBy, dispatchedAt, state } = parcel;
+  // The time of a re-mould is counted from when its core arrives.
+  const isCounted = !dispatchedAt && state !== "core-awaited" && state !== "core-refused";
   return (
     <section>
       <RuledHeading>
@@ -48,7 +50,7 @@ export function OrderParcelSection({ parcel, label, currency, scale, isPaid }: P
           {workshop.name}
         </Link>
         , {workshop.town}, {workshop.countryName}
-        {isPaid && leavesBy && !dispatchedAt && `; leaves by ${formatDay(leavesBy)}`}
+        {isPaid && leavesBy && isCounted && `; leaves by ${formatDay(leavesBy)}`}
       </p>
       {isPaid && (
         <div className="mt-4">

@@ -200,6 +200,17 @@ describe("an order that was paid", () => {
     expect(screen.getByText("Left on 2 December 2026.")).toBeVisible();
   });
 
+  it("says by when a parcel leaves, but not while its core is awaited", async () => {
+    const order = paid();
+    order.parcels[1]!.state = "core-awaited";
+    stubApi(routes(() => order));
+    show();
+    const said = (name: RegExp) => screen.getByRole("heading", { name }).closest("section");
+    await screen.findByRole("heading", { name: /from Kade Works/ });
+    expect(said(/from North Moor Rubber/)).toHaveTextContent("leaves by 3 December 2026");
+    expect(said(/from Kade Works/)).not.toHaveTextContent("leaves by");
+  });
+
   it("says what was given back", async () => {
     stubApi(routes(() => ({ ...paid(), refundedMinor: 900 })));
     show();
