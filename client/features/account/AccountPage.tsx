@@ -54,6 +54,11 @@ export function AccountPage() {
                     Parcels to send
                   </Link>
                 </li>
+                <li>
+                  <Link to="/workshop/settings" className="inline-block min-h-6">
+                    Words, postage and tax
+                  </Link>
+                </li>
               </ul>
             </section>
           )}

@@ -1,17 +1,18 @@
+import { useRef } from "react";
 import { useFieldArray } from "react-hook-form";
 import { countryName } from "#shared/domain/countries";
-import { countryCodes } from "#shared/schemas/countryCodes";
 import { Button } from "../../ui/Button";
 import { SelectField } from "../../ui/SelectField";
 import { TextField } from "../../ui/TextField";
+import { countriesByName } from "./countriesByName";
 import { emptyRegistration } from "./settingsValues";
 import type { SettingsForm } from "./ZoneFields";
-
-const byName = [...countryCodes].sort((a, b) => countryName(a).localeCompare(countryName(b), "en"));
 
 /** The countries whose tax a workshop collects. */
 export function TaxFields({ form: { control, register, formState } }: { form: SettingsForm }) {
   const { fields, append, remove } = useFieldArray({ control, name: "taxRegistrations" });
+  // What was taken out takes the focus with it, unless it is put where the list goes on.
+  const adding = useRef<HTMLButtonElement>(null);
   const errors = formState.errors.taxRegistrations;
   return (
     <div className="grid gap-6">
@@ -28,7 +29,7 @@ export function TaxFields({ form: { control, register, formState } }: { form: Se
             error={errors?.[index]?.country?.message}
           >
             <option value="">Choose</option>
-            {byName.map((code) => (
+            {countriesByName.map((code) => (
               <option key={code} value={code}>
                 {countryName(code)}
               </option>
@@ -45,12 +46,18 @@ export function TaxFields({ form: { control, register, formState } }: { form: Se
             {...register(`taxRegistrations.${index}.ratePercent`)}
             error={errors?.[index]?.ratePercent?.message}
           />
-          <Button className="justify-self-start sm:col-span-3" onClick={() => remove(index)}>
+          <Button
+            className="justify-self-start sm:col-span-3"
+            onClick={() => {
+              remove(index);
+              adding.current?.focus();
+            }}
+          >
             Take out registration {index + 1}
           </Button>
         </fieldset>
       ))}
-      <Button className="justify-self-start" onClick={() => append(emptyRegistration)}>
+      <Button ref={adding} className="justify-self-start" onClick={() => append(emptyRegistration)}>
         Add a registration
       </Button>
     </div>

@@ -1,9 +1,11 @@
 import { useState } from "react";
 import { countryName } from "#shared/domain/countries";
-import { countryCodes, europeanUnion } from "#shared/schemas/countryCodes";
+import { europeanUnion } from "#shared/schemas/countryCodes";
 import { announce } from "../../lib/announcements";
 import { Button } from "../../ui/Button";
+import { fieldId } from "../../ui/fieldParts";
 import { SelectField } from "../../ui/SelectField";
+import { byCountryName, countriesByName } from "./countriesByName";
 
 type Props = {
   /** The field's name in the form, which the error summary leads to. */
@@ -15,13 +17,12 @@ type Props = {
   onChange: (countries: string[]) => void;
 };
 
-const byName = [...countryCodes].sort((a, b) => countryName(a).localeCompare(countryName(b), "en"));
 const [union, rest] = ["union", "rest"];
 
 /** The countries of a zone: added one by one, or the many that are left. */
 export function ZoneCountries({ name, countries, taken, error, onChange }: Props) {
   const [choice, setChoice] = useState("");
-  const left = byName.filter((code) => !taken.includes(code));
+  const left = countriesByName.filter((code) => !taken.includes(code));
   const unionLeft = europeanUnion.filter((code) => left.includes(code));
   const add = () => {
     const added = choice === union ? unionLeft : choice === rest ? left : left.filter((code) => code === choice);
@@ -33,25 +34,30 @@ export function ZoneCountries({ name, countries, taken, error, onChange }: Props
   const remove = (code: string) => {
     onChange(countries.filter((one) => one !== code));
     announce(`${countryName(code)} taken out`);
+    document.getElementById(fieldId(name))?.focus();
   };
   return (
     <div className="grid gap-3">
       <ul aria-label="Countries of this zone" className="flex max-h-64 flex-wrap gap-2 overflow-y-auto">
-        {countries.map((code) => (
+        {byCountryName(countries).map((code) => (
           <li key={code} className="flex items-center gap-1 border border-rule pl-3">
             {countryName(code)}
-            <Button look="quiet" aria-label={`Take out ${countryName(code)}`} onClick={() => remove(code)}>
+            <Button
+              look="quiet"
+              className="min-w-8 px-2 no-underline"
+              aria-label={`Take out ${countryName(code)}`}
+              onClick={() => remove(code)}
+            >
               ×
             </Button>
           </li>
         ))}
       </ul>
-      <div className="flex flex-wrap items-end gap-3">
+      <div className="flex items-start gap-3">
         <div className="min-w-0 flex-1">
           <SelectField
             name={name}
             label="Add countries"
-            hint="A country lies in one zone only: those of other zones are not offered."
             error={error}
             value={choice}
             onChange={({ target }) => setChoice(target.value)}
@@ -66,7 +72,9 @@ export function ZoneCountries({ name, countries, taken, error, onChange }: Props
             ))}
           </SelectField>
         </div>
-        <Button onClick={add}>Add</Button>
+        <Button className="mt-[1.875rem]" onClick={add}>
+          Add
+        </Button>
       </div>
     </div>
   );
