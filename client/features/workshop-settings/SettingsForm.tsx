@@ -6,7 +6,7 @@ import { listFieldErrors } from "../../lib/listFieldErrors";
 import { setProblemErrors } from "../../lib/setProblemErrors";
 import { AreaField } from "../../ui/AreaField";
 import { Button } from "../../ui/Button";
-import { FormErrors } from "../../ui/FormErrors";
+import { type FormError, FormErrors } from "../../ui/FormErrors";
 import { RuledHeading } from "../../ui/RuledHeading";
 import { TextField } from "../../ui/TextField";
 import { useSaveSettings } from "./api";
@@ -18,6 +18,15 @@ import { ZoneFields } from "./ZoneFields";
 const elsewhere =
   "The settings were changed in another place since you opened them, so nothing was kept. What you typed stays here: " +
   "open this page in another tab to see what changed, then load this one again";
+
+/** Zones, and registrations, have the same fields: the summary says which is meant. */
+const withPlace = ({ field, message }: FormError): FormError => {
+  const [list, index] = field?.split(".") ?? [];
+  const at = Number(index) + 1;
+  if (list === "zones" && at > 0) return { field, message: `${message}, for zone ${at}` };
+  if (list === "taxRegistrations" && at > 0) return { field, message: `${message}, for registration ${at}` };
+  return { field, message };
+};
 
 /** Everything that a workshop sets, in one form that is kept whole. */
 export function SettingsForm({ page }: { page: Answer }) {
@@ -40,7 +49,7 @@ export function SettingsForm({ page }: { page: Answer }) {
   });
   return (
     <form noValidate onSubmit={(event) => void submit(event)} className="grid grid-cols-1 gap-8">
-      <FormErrors errors={listFieldErrors(errors)} attempt={submitCount} />
+      <FormErrors errors={listFieldErrors(errors).map(withPlace)} attempt={submitCount} />
       <fieldset disabled={isSubmitting} className="grid grid-cols-1 gap-x-14 gap-y-8 lg:grid-cols-[1.5fr_1fr]">
         <div className="grid min-w-0 content-start gap-8">
           <section className="grid gap-5">

@@ -106,8 +106,21 @@ it("says what is wrong beside each field and in a summary that takes the focus, 
   expect(screen.getByLabelText("A parcel, EUR")).toHaveValue("a lot");
   expect(screen.getByLabelText("A parcel, EUR")).toHaveAccessibleDescription("Write an amount like 4.90");
   expect(screen.getByLabelText("Rate, %")).toHaveAccessibleDescription(/from 0 to 50/);
-  await userEvent.click(within(summary).getByRole("link", { name: "Write an amount like 4.90" }));
+  await userEvent.click(within(summary).getByRole("link", { name: "Write an amount like 4.90, for zone 1" }));
   expect(screen.getByLabelText("A parcel, EUR")).toHaveFocus();
+  expect(sent()).toEqual([]);
+});
+
+it("refuses to be without a zone, and leads to where one is added", async () => {
+  await open();
+  await userEvent.click(screen.getByRole("button", { name: "Take out zone 1" }));
+  const add = screen.getByRole("button", { name: "Add a zone" });
+  expect(add).toHaveFocus();
+  await keep();
+  const summary = await screen.findByRole("alert");
+  await userEvent.click(within(summary).getByRole("link", { name: /^Add at least one zone/ }));
+  expect(add).toHaveFocus();
+  expect(add).toHaveAccessibleDescription(/^Add at least one zone/);
   expect(sent()).toEqual([]);
 });
 
