@@ -56,7 +56,7 @@ export async function saveWorkshopSettings(actor: Actor, settings: WorkshopSetti
     await audit(
       {
         actorId: actor.id,
-        action: "workshop.settings-saved",
+        action: "settings-saved",
         subjectType: "workshop",
         subjectId: workshopId,
         detail: { before, after },

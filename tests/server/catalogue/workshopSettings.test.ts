@@ -82,7 +82,7 @@ describe("a workshop's settings", () => {
     expect(entries).toHaveLength(1);
     expect(entries[0]).toMatchObject({
       actorId: workshop.ownerId,
-      action: "workshop.settings-saved",
+      action: "settings-saved",
       detail: { before: { zones: [{ zone: "everywhere" }] }, after: { dispatchDays: 5 } },
     });
   });
